@@ -42,8 +42,13 @@ export default defineConfig(
   {
     files: ['web/src/**/*.{ts,tsx}'],
     extends: [reactHooks.configs.flat.recommended],
-    // The form library's `watch` is known to the rule and used nowhere; its warning would only name the import.
-    rules: { 'react-hooks/incompatible-library': 'off', 'react-hooks/exhaustive-deps': 'error' },
+    rules: {
+      'react-hooks/exhaustive-deps': 'error',
+      // These three speak about the React compiler, which this build does not use.
+      'react-hooks/incompatible-library': 'off',
+      'react-hooks/preserve-manual-memoization': 'off',
+      'react-hooks/set-state-in-effect': 'off',
+    },
   },
   { files: ['web/src/features/**/*.{ts,tsx}'], ignores: tests, rules: { 'house/theme-colors-only': 'error' } },
   {
