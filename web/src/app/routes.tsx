@@ -1,0 +1,37 @@
+import { Navigate, type RouteObject } from 'react-router-dom';
+import { ErrorPage } from './error-page';
+import { LoadingPage } from './loading-page';
+import { NotFoundPage } from './not-found-page';
+
+const clinicSections: RouteObject[] = [
+  { index: true, element: <Navigate to="users" replace /> },
+  { path: 'users', lazy: () => import('../features/clinic/users-page') },
+  { path: 'programs', lazy: () => import('../features/clinic/programs-page') },
+  { path: 'rules', lazy: () => import('../features/clinic/rules-page') },
+  { path: 'audit', lazy: () => import('../features/clinic/audit-page') },
+];
+
+const signedInRoutes: RouteObject[] = [
+  { index: true, lazy: () => import('./first-page') },
+  {
+    path: 'patients',
+    lazy: () => import('../features/patients/patients-page'),
+    children: [{ path: 'new', lazy: () => import('../features/patients/new-patient-drawer') }],
+  },
+  { path: 'clinic', lazy: () => import('../features/clinic/clinic-page'), children: clinicSections },
+  { path: 'home', lazy: () => import('../features/home/home-page') },
+  { path: '*', element: <NotFoundPage /> },
+];
+
+/** Every address of the web. Pages load on demand; only the router itself comes with the first load. */
+export const routes: RouteObject[] = [
+  {
+    ErrorBoundary: ErrorPage,
+    HydrateFallback: LoadingPage,
+    children: [
+      { path: '/sign-in', lazy: () => import('../features/sign-in/sign-in-page') },
+      { path: '/welcome', lazy: () => import('../features/welcome/welcome-page') },
+      { path: '/', lazy: () => import('./auth-gate'), children: signedInRoutes },
+    ],
+  },
+];

@@ -1,0 +1,37 @@
+/** Patient-facing texts. Plain words, about a sixth-grade level. Another language is another object of this shape. */
+export const messagesEn = {
+  'home.title': 'Home',
+  'home.greeting.morning': 'Good morning, {name}',
+  'home.greeting.afternoon': 'Good afternoon, {name}',
+  'home.greeting.evening': 'Good evening, {name}',
+  'home.program': 'Your program',
+  'home.program.sessions': '{count} sessions in {weeks} weeks',
+  'home.program.starts': 'Starts {date}',
+  'home.program.started': 'Started {date}',
+  'home.program.none': 'You have no program at the moment. Call us with any question.',
+  'home.questions': 'Questions?',
+  'home.call-clinic': 'Call {phone}',
+  'home.call-us': 'Call us',
+  'home.caution': 'This page does not replace your care team. Ask them before you change what you do.',
+  'emergency.question': 'Chest pain, or much shorter of breath than usual?',
+  'emergency.answer': 'Call your local emergency number now. In the US it is 911.',
+  'account.sign-out': 'Sign out',
+  'error.load': 'This page could not be loaded.',
+  'error.try-again': 'Try again',
+  'welcome.title': 'Welcome, {name}',
+  'welcome.lead': 'Choose a password for {clinic}. You sign in with {email}.',
+  'welcome.password': 'New password',
+  'welcome.password.hint': 'At least 12 characters. A few words in a row work well.',
+  'welcome.password.short': 'Use at least 12 characters. You have {count}.',
+  'welcome.password.long': 'Use at most 200 characters.',
+  'welcome.again': 'The same password again',
+  'welcome.again.differs': 'The two passwords differ. Type the second one again.',
+  'welcome.save': 'Save and sign in',
+  'welcome.saving': 'Saving',
+  'welcome.used': 'This link has been used or is too old. Ask your clinic for a new one.',
+  'welcome.missing': 'This link is not complete. Open it again from your message, or ask your clinic for a new one.',
+  'welcome.to-sign-in': 'Go to sign in',
+} as const;
+
+export type MessageKey = keyof typeof messagesEn;
+export type Messages = Record<MessageKey, string>;

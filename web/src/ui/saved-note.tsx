@@ -1,0 +1,19 @@
+import type { ReactNode } from 'react';
+import { Icon } from './icon';
+
+interface SavedNoteProps {
+  /** Where it went; null keeps the place ready so that a screen reader announces what appears. */
+  children: ReactNode;
+}
+
+/** Said in place, where the work is, instead of a message that floats over the page. */
+export const SavedNote = ({ children }: SavedNoteProps) => (
+  <p role="status" className="flex min-h-6 items-center gap-2 text-note text-fern">
+    {children && (
+      <>
+        <Icon name="check" size={18} />
+        <span>{children}</span>
+      </>
+    )}
+  </p>
+);
