@@ -5,3 +5,8 @@ export const projectRoot = path.resolve(import.meta.dirname, '../..');
 
 /** Folder of everything that must survive a restart; ignored by git. */
 export const dataDir = path.join(projectRoot, '.data');
+
+/** A path as the person typed it, from the folder where the command was typed. */
+export function pathFromUser(typed: string): string {
+  return path.resolve(process.env.INIT_CWD ?? process.cwd(), typed);
+}

@@ -11,6 +11,8 @@ export interface TestDatabase {
 export interface RunningProduct {
   baseUrl: string;
   databaseUrl: string;
+  /** Program of the browser. */
+  chromium: string;
 }
 
 declare module 'vitest' {
