@@ -19,15 +19,19 @@ export function canEnter(dir: string, account: ServerAccount): boolean {
   }
 }
 
+/** Where a new cluster would lie: in the data folder, or outside where the account cannot reach that. */
+export function newClusterBase(dataDir: string, account: ServerAccount): string {
+  const unique = randomBytes(4).toString('hex');
+  if (canEnter(dataDir, account)) return path.join(dataDir, `postgres-${unique}`);
+  const project = createHash('sha256').update(realpathSync(dataDir)).digest('hex').slice(0, 12);
+  return path.join('/var/tmp', `slighthill-${project}-${unique}`);
+}
+
 /** Makes a folder of our own for a new cluster. An existing one is never adopted: its name is new each time. */
 export function makeClusterBase(dataDir: string, account: ServerAccount): string {
   // With the default mode: a mode given to mkdir would lock the account out of the folders above as well.
   mkdirSync(dataDir, { recursive: true });
-  const unique = randomBytes(4).toString('hex');
-  const project = createHash('sha256').update(realpathSync(dataDir)).digest('hex').slice(0, 12);
-  const base = canEnter(dataDir, account)
-    ? path.join(dataDir, `postgres-${unique}`)
-    : path.join('/var/tmp', `slighthill-${project}-${unique}`);
+  const base = newClusterBase(dataDir, account);
   mkdirSync(base, { mode: 0o700 });
   handOver(base, account);
   return base;
