@@ -43,6 +43,7 @@ export const SessionCover = ({ user, onWelcomeBack }: SessionCoverProps) => {
     } catch (caught) {
       setSaving(false);
       setError(explain(caught));
+      password.current?.focus();
       password.current?.select();
     }
   };

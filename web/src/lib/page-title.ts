@@ -1,22 +1,32 @@
-import { useEffect } from 'react';
+import { useEffect, useState } from 'react';
 
 const product = 'Slighthill';
-let current = product;
+const titles = new Map<number, string>();
+let nextOrder = 0;
 let cover: string | null = null;
 
+/** The innermost page's title: pages are numbered as they first render, and an outer page renders first. */
 const show = (): void => {
-  document.title = cover ?? current;
+  const innermost = titles.get(Math.max(...titles.keys()));
+  const words = cover ?? innermost;
+  document.title = words ? `${words} · ${product}` : product;
 };
 
 /** While the page is covered, its title says nothing about whom it shows. */
 export const setCoverTitle = (title: string | null): void => {
-  cover = title === null ? null : `${title} · ${product}`;
+  cover = title;
   show();
 };
 
+/** A drawer's title stands over its page's while the drawer is open. */
 export const usePageTitle = (title: string | null): void => {
+  const [order] = useState(() => nextOrder++);
   useEffect(() => {
-    current = title === null || title === '' ? product : `${title} · ${product}`;
+    titles.set(order, title ?? '');
     show();
-  }, [title]);
+    return () => {
+      titles.delete(order);
+      show();
+    };
+  }, [order, title]);
 };

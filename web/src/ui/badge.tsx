@@ -23,7 +23,7 @@ interface BadgeProps {
 export const Badge = ({ tone = 'plain', icon, children }: BadgeProps) => (
   <span
     className={cx(
-      'inline-flex min-h-6 items-center gap-1.5 rounded-chip px-2.5 text-note font-semibold whitespace-nowrap',
+      '-my-1 inline-flex min-h-6 items-center gap-1.5 rounded-chip px-2.5 text-note font-semibold whitespace-nowrap',
       tones[tone],
     )}
   >

@@ -24,7 +24,7 @@ export const MarginNav = ({ label, items, stickyTop = 'calc(var(--top-bar-height
     item.current ?? (pathname === item.to || pathname.startsWith(`${item.to}/`));
   return (
     <nav aria-label={label} className="margin:sticky" style={{ top: stickyTop }} data-print="hide">
-      <ul className="-mx-1 flex gap-1 overflow-x-auto p-1 margin:m-0 margin:-ml-3.5 margin:flex-col margin:p-0">
+      <ul className="-mx-3.5 flex gap-1 overflow-x-auto p-1 margin:m-0 margin:-ml-3.5 margin:flex-col margin:p-0">
         {items.map((item) => (
           <li key={item.to}>
             <Link

@@ -1,4 +1,4 @@
-import { useId, type ReactNode } from 'react';
+import { useId, type ReactNode, type Ref } from 'react';
 import { cx } from './cx';
 
 export interface RadioChoice<Value extends string> {
@@ -18,6 +18,8 @@ interface RadioGroupProps<Value extends string> {
   arrange?: 'row' | 'list';
   name?: string;
   disabled?: boolean;
+  /** The first choice, so that a form can bring the reader here. */
+  inputRef?: Ref<HTMLInputElement>;
 }
 
 export const RadioGroup = <Value extends string>({
@@ -30,6 +32,7 @@ export const RadioGroup = <Value extends string>({
   arrange = 'row',
   name,
   disabled = false,
+  inputRef,
 }: RadioGroupProps<Value>) => {
   const id = useId();
   const note = error ?? hint;
@@ -43,10 +46,11 @@ export const RadioGroup = <Value extends string>({
       <div
         className={cx('flex', arrange === 'row' ? 'min-h-10 flex-wrap items-center gap-x-6 gap-y-1' : 'flex-col gap-1')}
       >
-        {choices.map((choice) => (
+        {choices.map((choice, index) => (
           <label key={choice.value} className="flex min-h-8 cursor-pointer items-start gap-3 py-1 text-body">
             <input
               type="radio"
+              ref={index === 0 ? inputRef : undefined}
               name={name ?? id}
               value={choice.value}
               checked={value === choice.value}

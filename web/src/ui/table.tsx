@@ -26,14 +26,17 @@ export const TableHead = ({ children }: { children: ReactNode }) => (
 
 interface HeaderCellProps extends ThHTMLAttributes<HTMLTableCellElement> {
   numeric?: boolean;
+  /** Stays under the top bar while its page scrolls; not inside a drawer, which scrolls by itself. */
+  sticky?: boolean;
 }
 
-export const HeaderCell = ({ numeric = false, className, ...rest }: HeaderCellProps) => (
+export const HeaderCell = ({ numeric = false, sticky = true, className, ...rest }: HeaderCellProps) => (
   <th
     scope="col"
     {...rest}
     className={cx(
-      'sticky top-(--top-bar-height) z-10 border-b border-rule bg-paper py-2 pr-4 text-head text-ink-soft last:pr-0',
+      'border-b border-rule py-2 pr-4 text-head whitespace-nowrap text-ink-soft last:pr-0',
+      sticky && 'sticky top-(--top-bar-height) z-10 bg-paper',
       numeric && 'text-right',
       className,
     )}
@@ -61,7 +64,7 @@ export const Cell = ({ label, numeric = false, asHeader = false, className, chil
       {...rest}
       {...(asHeader ? { scope: 'row' } : {})}
       className={cx(
-        'py-2.5 pr-4 align-baseline font-normal last:pr-0 max-row:flex max-row:gap-3 max-row:py-0.5 max-row:pr-0 max-row:text-left',
+        'py-2.5 pr-4 align-baseline font-normal last:pr-0 max-row:flex max-row:items-baseline max-row:gap-3 max-row:py-0.5 max-row:pr-0 max-row:text-left',
         numeric && 'text-right',
         className,
       )}
@@ -71,7 +74,7 @@ export const Cell = ({ label, numeric = false, asHeader = false, className, chil
           {label}
         </span>
       )}
-      {children}
+      <div className="max-row:min-w-0 max-row:flex-1">{children}</div>
     </Tag>
   );
 };

@@ -17,7 +17,7 @@ export const UnsavedWorkDialog = ({ work }: UnsavedWorkDialogProps) => (
         <Button kind="danger" onClick={work.leave}>
           Leave
         </Button>
-        <Button kind="main" onClick={work.stay}>
+        <Button kind="main" autoFocus onClick={work.stay}>
           Keep working
         </Button>
       </>

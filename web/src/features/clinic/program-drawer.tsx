@@ -22,8 +22,8 @@ interface ProgramDrawerProps {
 const numbers = [
   { name: 'plannedSessions', label: 'Sessions planned', unit: 'sessions' },
   { name: 'weeks', label: 'Over', unit: 'weeks' },
-  { name: 'sessionsPerWeek', label: 'At most', unit: 'a week' },
-  { name: 'sessionsPerDay', label: 'At most', unit: 'a day' },
+  { name: 'sessionsPerWeek', label: 'Most in one week', unit: 'sessions' },
+  { name: 'sessionsPerDay', label: 'Most in one day', unit: 'sessions' },
 ] as const;
 
 const fields = ['name', 'plannedSessions', 'weeks', 'sessionsPerWeek', 'sessionsPerDay', 'sessionKinds'] as const;

@@ -6,12 +6,16 @@ type Course = NonNullable<PatientListItem['enrollment']>;
 const words: Record<Course['status'], string> = {
   planned: 'Starts',
   active: 'Since',
-  paused: 'Paused, since',
-  completed: 'Completed, from',
-  'partly-completed': 'Partly completed, from',
-  withdrawn: 'Withdrawn, from',
+  paused: 'Paused',
+  completed: 'Completed',
+  'partly-completed': 'Partly completed',
+  withdrawn: 'Withdrawn',
 };
 
-/** One patient's course in a row: "Since Sep 14, 2026". */
-export const courseWords = (course: Course | null): string =>
-  course ? `${words[course.status]} ${formatDate(course.startOn)}` : 'Not enrolled';
+const dated: readonly Course['status'][] = ['planned', 'active'];
+
+/** One patient's course in a row: "Since Sep 14, 2026", "Completed". */
+export const courseWords = (course: Course | null): string => {
+  if (!course) return 'Not enrolled';
+  return dated.includes(course.status) ? `${words[course.status]} ${formatDate(course.startOn)}` : words[course.status];
+};

@@ -117,6 +117,7 @@ export const Component = () => {
               choices={sexes}
               value={field.value ?? null}
               onValueChange={field.onChange}
+              inputRef={field.ref}
               error={errors.sexForPrediction?.message}
             />
           )}

@@ -2,7 +2,9 @@ import { diagnosisGroupLabels, type PatientListItem } from '@slighthill/shared/c
 import { Link } from 'react-router-dom';
 import { formatDate } from '../../lib/clinic-time';
 import { Badge } from '../../ui/badge';
+import { cx } from '../../ui/cx';
 import { Cell, Row } from '../../ui/table';
+import { VisuallyHidden } from '../../ui/visually-hidden';
 import { courseWords } from './course-words';
 
 interface PatientRowProps {
@@ -20,17 +22,18 @@ export const PatientRow = ({ patient }: PatientRowProps) => (
         {patient.familyName}, {patient.givenName}
       </Link>
     </Cell>
-    <Cell label="Age" numeric>
+    <Cell label="Age" numeric className="max-row:hidden">
       {patient.ageYears}
     </Cell>
     <Cell label="Born" className="whitespace-nowrap text-ink-soft">
       {formatDate(patient.birthDate)}
+      <span className="hidden max-row:inline">{`, ${patient.ageYears} years old`}</span>
     </Cell>
     <Cell label="Record no." className="text-ink-soft">
       {patient.recordNumber}
     </Cell>
     <Cell label="Diagnosis">{diagnosisGroupLabels[patient.diagnosisGroup]}</Cell>
-    <Cell label="Course" className={patient.enrollment ? '' : 'text-ink-soft'}>
+    <Cell label="Course" className={cx('whitespace-nowrap', !patient.enrollment && 'text-ink-soft')}>
       {courseWords(patient.enrollment)}
     </Cell>
     <Cell label="Pattern">
@@ -46,13 +49,13 @@ export const PatientRow = ({ patient }: PatientRowProps) => (
     <Cell label="Last test" className="whitespace-nowrap">
       {patient.lastTestOn ? formatDate(patient.lastTestOn) : <span className="text-ink-soft">None</span>}
     </Cell>
-    <Cell label="Flags" className="whitespace-nowrap">
+    <Cell label="Flags" className={cx('whitespace-nowrap', patient.openFlags === 0 && 'max-row:hidden')}>
       {patient.openFlags > 0 ? (
         <Badge tone="danger" icon="alert">
           {patient.openFlags === 1 ? '1 flag' : `${patient.openFlags} flags`}
         </Badge>
       ) : (
-        <span className="text-ink-soft">None</span>
+        <VisuallyHidden>None</VisuallyHidden>
       )}
     </Cell>
   </Row>

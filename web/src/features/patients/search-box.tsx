@@ -14,7 +14,10 @@ export const SearchBox = ({ value, onValueChange, onLeaveDown }: SearchBoxProps)
   const input = useRef<HTMLInputElement>(null);
   useHotkey('/', () => input.current?.focus());
   return (
-    <search className="flex min-h-9.5 w-full items-center gap-2 rounded-control border border-edge bg-surface pl-3 focus-within:outline-3 focus-within:outline-offset-2 focus-within:outline-tarn row:w-84">
+    <div
+      role="search"
+      className="flex min-h-9.5 w-full items-center gap-2 rounded-control border border-edge bg-surface pl-3 focus-within:outline-3 focus-within:outline-offset-2 focus-within:outline-tarn row:w-84"
+    >
       <Icon name="search" size={18} className="text-ink-soft" />
       <input
         ref={input}
@@ -38,6 +41,6 @@ export const SearchBox = ({ value, onValueChange, onLeaveDown }: SearchBoxProps)
       <span className="hidden pr-2 row:block">
         <Key>/</Key>
       </span>
-    </search>
+    </div>
   );
 };

@@ -62,6 +62,7 @@ export const Component = () => {
     } catch (error) {
       setSaving(false);
       setProblem(explain(error));
+      password.current?.focus();
       password.current?.select();
     }
   };
