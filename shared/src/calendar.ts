@@ -38,3 +38,11 @@ export function wholeYears(birthDate: string, onDate: string): number {
   const beforeBirthday = on.month < born.month || (on.month === born.month && on.day < born.day);
   return on.year - born.year - (beforeBirthday ? 1 : 0);
 }
+
+const monthNames = ['Jan', 'Feb', 'Mar', 'Apr', 'May', 'Jun', 'Jul', 'Aug', 'Sep', 'Oct', 'Nov', 'Dec'] as const;
+
+/** A date as screens print it: `2026-10-12` is "Oct 12, 2026". */
+export function dateInWords(date: string): string {
+  const { year, month, day } = parseDate(date);
+  return `${monthNames[month - 1]} ${day}, ${year}`;
+}

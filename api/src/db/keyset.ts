@@ -1,0 +1,35 @@
+import { AppError } from '../errors/app-error';
+
+/** A cursor is the sort key of the last row shown, opaque to clients. */
+export function encodeCursor(key: readonly (string | number | null)[]): string {
+  return Buffer.from(JSON.stringify(key)).toString('base64url');
+}
+
+export function decodeCursor(cursor: string | undefined, parts: number): (string | number | null)[] | null {
+  if (cursor === undefined) return null;
+  try {
+    const key: unknown = JSON.parse(Buffer.from(cursor, 'base64url').toString('utf8'));
+    const fits =
+      Array.isArray(key) &&
+      key.length === parts &&
+      key.every((part) => part === null || typeof part === 'string' || typeof part === 'number');
+    if (fits) return key as (string | number | null)[];
+  } catch {
+    // falls through to the one answer for a cursor that was not made here
+  }
+  throw new AppError('invalid-input', 'This list could not be continued. Open it again.', [
+    { path: 'cursor', message: 'Not a cursor of this list' },
+  ]);
+}
+
+/** Splits `limit + 1` fetched rows into a page and the cursor that continues it. */
+export function pageOf<Row, Item>(
+  rows: Row[],
+  limit: number,
+  keyOf: (row: Row) => readonly (string | number | null)[],
+  present: (row: Row) => Item,
+): { items: Item[]; nextCursor: string | null } {
+  const page = rows.slice(0, limit);
+  const last = page.at(-1);
+  return { items: page.map(present), nextCursor: rows.length > limit && last ? encodeCursor(keyOf(last)) : null };
+}
