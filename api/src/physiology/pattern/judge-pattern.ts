@@ -42,7 +42,7 @@ export interface JudgedPattern {
 }
 
 /** GOLD grades only confirmed COPD, after bronchodilator, with a ratio under 0.70 (rules GR-0, GR-7). */
-export const goldApplies = (test: PatternTest, rules: PatternRules): boolean =>
+export const goldApplies = (test: Pick<PatternTest, 'state' | 'ratioLowByFixed'>, rules: PatternRules): boolean =>
   rules.copdConfirmed && test.state === 'after' && test.ratioLowByFixed;
 
 /**

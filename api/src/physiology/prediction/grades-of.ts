@@ -1,18 +1,11 @@
 import { snap } from '@slighthill/shared/format';
-import type { GradingRuleId, MeasureId } from '@slighthill/shared/measures';
+import type { MeasureId } from '@slighthill/shared/measures';
 import { bandOf } from '../grading/band-of';
 import { quantityOf } from '../grading/quantity-of';
 import type { GradingRule } from '../grading/types';
 import type { JudgedPattern } from '../pattern/judge-pattern';
 import { gradeLowTlc } from '../pattern/severity-of';
-import type { JudgedMeasures } from './prediction-response';
-
-export interface Grade {
-  rule: GradingRuleId;
-  measure: MeasureId;
-  bandId: string;
-  label: string;
-}
+import type { Grade, JudgedMeasures } from './types';
 
 /**
  * Grades of the values given: FEV1 as the pattern's severity, TLC below its LLN, DLCO below its LLN or at most 60

@@ -2,7 +2,7 @@ import { getMeasure, type MeasureId } from '@slighthill/shared/measures';
 import type { JudgedPattern } from '../pattern/judge-pattern';
 import { getReferenceSet } from '../reference-sets/index';
 import type { NotPredictable } from '../reference-sets/predict';
-import type { JudgedMeasures, PredictionRequest } from './prediction-response';
+import type { JudgedMeasures, PredictionRequest } from './types';
 
 const reasonWords: Partial<Record<NotPredictable, (set: string) => string>> = {
   'age-outside-set': (set) => `age is outside ${set}`,

@@ -1,6 +1,6 @@
 import { judgePattern, type JudgedPattern, type PatternRules } from '../pattern/judge-pattern';
 import { isBelowFixedRatio, isRatioBelowFixed } from '../spirometry/fixed-ratio';
-import type { JudgedMeasures, PredictionRequest } from './prediction-response';
+import type { JudgedMeasures, PredictionRequest } from './types';
 
 type OneJudged = NonNullable<JudgedMeasures['fev1']>;
 

@@ -1,62 +1,19 @@
 import { getMeasure, type GradingRuleId, type MeasureId } from '@slighthill/shared/measures';
-import { findGradingRule, gradingRuleFor, type ClinicSeverityRules } from '../grading/index';
-import type { BronchodilatorState, JudgedPattern } from '../pattern/judge-pattern';
-import type { RatioRule } from '../pattern/pattern-words';
+import { findGradingRule, gradingRuleFor } from '../grading/index';
 import { assess } from '../reference-sets/assess';
 import { getReferenceSet, referenceSetFor } from '../reference-sets/index';
-import { predict, type NotPredictable } from '../reference-sets/predict';
-import type { ReferenceSetId, Sex } from '../reference-sets/types';
+import { predict } from '../reference-sets/predict';
 import { checkGroup, type InputError } from './check-group';
-import { gradesOf, type Grade } from './grades-of';
+import { gradesOf } from './grades-of';
 import { predictionNotes } from './prediction-notes';
 import { predictionPattern } from './prediction-pattern';
-
-export interface PredictionRequest {
-  referenceSet: ReferenceSetId;
-  sex: Sex;
-  ageYears: number;
-  heightCm: number;
-  weightKg?: number | undefined;
-  group?: string | undefined;
-  bronchodilator?: BronchodilatorState | undefined;
-  diagnosisGroup?: string | undefined;
-  diagnosisConfirmed?: boolean | undefined;
-  ratioRule?: RatioRule | undefined;
-  gradingRule?: GradingRuleId | undefined;
-  /** In display units: volumes L, ratio a fraction, RV/TLC percent. */
-  values: Partial<Record<MeasureId, number>>;
-}
-
-export interface PredictionDefaults extends ClinicSeverityRules {
-  ratioRule: RatioRule;
-}
-
-export interface PredictedMeasure {
-  referenceSet: ReferenceSetId | null;
-  predicted: number | null;
-  lln: number | null;
-  uln: number | null;
-  value: number | null;
-  percentPredicted: number | null;
-  z: number | null;
-  zApproximate?: number;
-  reason?: NotPredictable;
-}
-
-export interface PredictionResponse {
-  referenceSet: ReferenceSetId;
-  measures: Partial<Record<MeasureId, PredictedMeasure>>;
-  pattern: (JudgedPattern & { spirometryTestId: null; tlcMeasurementId: null }) | null;
-  grades: Grade[];
-  notes: string[];
-}
-
-export type PredictionOutcome = { ok: true; response: PredictionResponse } | { ok: false; errors: InputError[] };
-
-/** Judged measures with the side of the LLN they lie on, which the response itself does not carry. */
-export type JudgedMeasures = Partial<
-  Record<MeasureId, PredictedMeasure & { belowLln: boolean | null; aboveUln: boolean | null }>
->;
+import type {
+  JudgedMeasures,
+  PredictionDefaults,
+  PredictionOutcome,
+  PredictionRequest,
+  PredictionResponse,
+} from './types';
 
 /**
  * The whole of a prediction (rules PV-0 to PV-7, GR-0 to GR-8): predicted value and limits of every measure of the named
@@ -127,11 +84,7 @@ function judgeOne(
   value: number | null,
 ): NonNullable<JudgedMeasures['fev1']> {
   const set = referenceSetFor(id, getMeasure(id).referenceKind, getReferenceSet(request.referenceSet));
-  const found = predict(
-    set,
-    id,
-    request.weightKg === undefined ? { ...request, weightKg: null } : { ...request, weightKg: request.weightKg },
-  );
+  const found = predict(set, id, request);
   const empty = { value, percentPredicted: null, z: null, belowLln: null, aboveUln: null };
   if (!found.computable)
     return { ...empty, referenceSet: set?.id ?? null, predicted: null, lln: null, uln: null, reason: found.reason };

@@ -17,8 +17,8 @@ export interface ReferencePerson {
   sex: Sex;
   ageYears: number;
   heightCm: number;
-  weightKg?: number | null;
-  group?: string | null;
+  weightKg?: number | null | undefined;
+  group?: string | null | undefined;
 }
 
 /** Skewness, median and coefficient of variation at this sex, age and height. */

@@ -1,5 +1,5 @@
 import type { GradingRuleId, MeasureId } from '@slighthill/shared/measures';
-import type { Band } from '../grading/types';
+import type { Band, BandQuantity } from '../grading/types';
 import type { BronchodilatorState, JudgedPattern } from '../pattern/judge-pattern';
 import type { RatioRule } from '../pattern/pattern-words';
 import type { ReferenceSetId, Sex } from '../reference-sets/types';
@@ -128,7 +128,7 @@ export interface TrendSeries {
   gradingRule: GradingRuleId | null;
   /** The state compared (rule TR-1 d); null for measures without one. */
   state: BronchodilatorState | null;
-  bands: readonly Band[];
+  bands: readonly (Band & { quantity: BandQuantity })[];
   points: TrendPoint[];
   baseline: TrendPoint | null;
   latest: TrendPoint | null;

@@ -1,0 +1,75 @@
+import { getMeasure, type MeasureId } from '@slighthill/shared/measures';
+import { gradingRuleFor } from '../grading/index';
+import type { Band, GradingRule } from '../grading/types';
+import type { Window } from './baseline-and-latest';
+import { changeOf } from './change-of';
+import { chooseComparable } from './comparable';
+import type { Evaluator } from './evaluator';
+import { pairNotes } from './pair-notes';
+import { pointOf, type PointContext } from './point-of';
+import { ratePerYear } from './rate-per-year';
+import { leftOutNotes, noPairNotes, predictionNotes } from './series-notes';
+import type { Patterns } from './trend-pattern';
+import type { TrendInput, TrendMeasurement, TrendSeries } from './types';
+
+export interface SeriesContext {
+  input: TrendInput;
+  evaluator: Evaluator;
+  patterns: Patterns;
+  window: Window;
+}
+
+/** One measure over time (rules TR-1 to TR-8). `results` are those of the measure, oldest first. */
+export function computeSeries(
+  id: MeasureId,
+  results: readonly TrendMeasurement[],
+  { input, evaluator, patterns, window }: SeriesContext,
+): TrendSeries {
+  const { options, person, clinic } = input;
+  const measure = getMeasure(id);
+  const rule = gradingRuleFor(id, options.gradingRule ?? null, clinic);
+  // F is nowhere, not even in the table (rule TR-1 b).
+  const shown = results.filter((result) => result.quality !== 'F');
+  const comparable = chooseComparable(measure, shown, window, options);
+  const includeLowQuality = options.includeLowQuality ?? false;
+  const context: PointContext = { measure, rule, comparable, includeLowQuality, gradesFev1: patterns.gradesFev1 };
+  const evaluated = shown.map((result) => ({ result, evaluation: evaluator.evaluate(result) }));
+  const points = evaluated.map(({ result, evaluation }) => pointOf(result, evaluation, context));
+  const { baseline, latest, note } = comparable.pair;
+  const set = evaluator.setOf(id);
+  const changed = baseline && latest ? changeOf(measure, baseline, latest, person.diagnosisGroup) : null;
+  const { rate, note: rateNote } = ratePerYear(comparable.days);
+  return {
+    measure: id,
+    unit: measure.unit.symbol,
+    referenceSet: set?.id ?? null,
+    gradingRule: rule?.id ?? null,
+    state: comparable.state,
+    bands: rule ? bandsOf(rule) : [],
+    points,
+    baseline: points.find((point) => point.role === 'baseline') ?? null,
+    latest: points.find((point) => point.role === 'latest') ?? null,
+    change: changed?.change ?? null,
+    zone: changed?.zone ?? null,
+    ratePerYear: rate,
+    notes: [
+      ...leftOutNotes(points),
+      ...(note ? [note] : []),
+      ...noPairNotes(comparable, window.lastAllowedOn),
+      ...(baseline && latest ? pairNotes(measure, baseline, latest, input.exacerbationOnsets) : []),
+      ...(changed?.notes ?? []),
+      ...predictionNotes(evaluated, set, person.sexForPrediction),
+      ...(rateNote && points.length > 0 ? [rateNote] : []),
+    ],
+  };
+}
+
+const known = new Map<GradingRule, TrendSeries['bands']>();
+
+function bandsOf(rule: GradingRule): TrendSeries['bands'] {
+  const found = known.get(rule);
+  if (found) return found;
+  const bands = rule.bands.map((band: Band) => ({ ...band, quantity: rule.quantity }));
+  known.set(rule, bands);
+  return bands;
+}

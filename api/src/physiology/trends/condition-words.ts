@@ -1,0 +1,40 @@
+import type { Condition, Measure } from '@slighthill/shared/measures';
+
+type Conditions = Readonly<Record<string, unknown>>;
+
+/** A condition as stored, or the registry's default. */
+export const conditionValue = (condition: Condition, key: string, conditions: Conditions): unknown =>
+  conditions[key] ?? condition.default ?? null;
+
+/** What must be equal for two results of a measure to be compared, besides the bronchodilator state. */
+export function blockingKey(measure: Measure, conditions: Conditions): string {
+  let key = '';
+  for (const [name, condition] of Object.entries(measure.conditions))
+    if (condition.onDifference === 'blocks') key += `${name}=${String(conditionValue(condition, name, conditions))};`;
+  return key;
+}
+
+export function valueWords(condition: Condition, value: unknown): string {
+  if (value === null || value === undefined) return 'not stated';
+  if (typeof value === 'boolean') return value ? 'yes' : 'no';
+  const index = condition.choices?.indexOf(String(value)) ?? -1;
+  const label = condition.choiceLabels?.[index]?.toLowerCase() ?? String(value);
+  return condition.unit ? `${label} ${condition.unit}` : label;
+}
+
+/** "course length 20 m instead of 30 m": the blocking conditions in which a result differs from the compared ones. */
+export function blockingDifference(measure: Measure, conditions: Conditions, compared: Conditions): string {
+  return Object.entries(measure.conditions)
+    .filter(([, condition]) => condition.onDifference === 'blocks')
+    .map(([name, condition]) => ({
+      condition,
+      value: conditionValue(condition, name, conditions),
+      other: conditionValue(condition, name, compared),
+    }))
+    .filter(({ value, other }) => value !== other)
+    .map(
+      ({ condition, value, other }) =>
+        `${condition.label.toLowerCase()} ${valueWords(condition, value)} instead of ${valueWords(condition, other)}`,
+    )
+    .join(', ');
+}

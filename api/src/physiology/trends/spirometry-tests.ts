@@ -1,0 +1,78 @@
+import { daysBetween } from '@slighthill/shared/calendar';
+import { judgePattern, type BronchodilatorState, type Judged, type PatternRules } from '../pattern/judge-pattern';
+import type { JudgedPattern } from '../pattern/judge-pattern';
+import { isBelowFixedRatio } from '../spirometry/fixed-ratio';
+import { qualityCounts } from './comparable';
+import type { Evaluator } from './evaluator';
+import type { TrendMeasurement } from './types';
+
+/** The results of one spirometry test that a pattern rests on. */
+export interface SpirometryTest {
+  sourceId: string;
+  takenAt: string;
+  takenOn: string;
+  state: BronchodilatorState;
+  fev1: TrendMeasurement;
+  fvc: TrendMeasurement;
+  ratio: TrendMeasurement;
+  qualityCounts: boolean;
+}
+
+/** Complete tests, oldest first. */
+export function spirometryTests(measurements: readonly TrendMeasurement[]): SpirometryTest[] {
+  const bySource = new Map<string, Partial<Record<string, TrendMeasurement>>>();
+  for (const result of measurements) {
+    if (result.measure !== 'fev1' && result.measure !== 'fvc' && result.measure !== 'fev1fvc') continue;
+    const parts = bySource.get(result.sourceId) ?? {};
+    parts[result.measure] = result;
+    bySource.set(result.sourceId, parts);
+  }
+  const tests: SpirometryTest[] = [];
+  for (const [sourceId, { fev1, fvc, fev1fvc }] of bySource) {
+    if (!fev1 || !fvc || !fev1fvc) continue;
+    const counts = qualityCounts(fev1.quality, false) && qualityCounts(fvc.quality, false);
+    const { takenAt, takenOn } = fev1;
+    const state = fev1.state ?? 'unknown';
+    tests.push({ sourceId, takenAt, takenOn, state, fev1, fvc, ratio: fev1fvc, qualityCounts: counts });
+  }
+  return tests;
+}
+
+/** The TLC nearest in time to a day, whatever the distance; of two as near the newer. */
+export function nearestTlc(tlcs: readonly TrendMeasurement[], takenOn: string): TrendMeasurement | null {
+  let nearest: { tlc: TrendMeasurement; days: number } | null = null;
+  for (const tlc of tlcs) {
+    const days = Math.abs(daysBetween(tlc.takenOn, takenOn));
+    if (nearest === null || days <= nearest.days) nearest = { tlc, days };
+  }
+  return nearest?.tlc ?? null;
+}
+
+export function judged(evaluator: Evaluator, result: TrendMeasurement): Judged | null {
+  const { assessed } = evaluator.evaluate(result);
+  if (!assessed) return null;
+  const { percentPredicted, z, belowLln } = assessed;
+  return { value: result.value, percentPredicted, z, belowLln };
+}
+
+/** Pattern of one test with a TLC near enough, or null where its values have no prediction. */
+export function patternOfTest(
+  test: SpirometryTest,
+  tlc: TrendMeasurement | null,
+  evaluator: Evaluator,
+  rules: PatternRules,
+): JudgedPattern | null {
+  const [fev1, fvc, ratio] = [test.fev1, test.fvc, test.ratio].map((result) => judged(evaluator, result));
+  if (!fev1 || !fvc || !ratio) return null;
+  return judgePattern(
+    {
+      ratioLowByFixed: isBelowFixedRatio(test.fev1.value * 1000, test.fvc.value * 1000),
+      ratioLowByLln: ratio.belowLln,
+      fev1,
+      fvc,
+      tlc: tlc && judged(evaluator, tlc),
+      state: test.state,
+    },
+    rules,
+  );
+}
