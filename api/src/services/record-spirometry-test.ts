@@ -1,5 +1,7 @@
 import type { SpirometryPairCreate, SpirometryTestCreate } from '@slighthill/shared/contracts/spirometry-test';
 import { randomUUID } from 'node:crypto';
+import { Op } from 'sequelize';
+import { invalidInput } from '../errors/app-error';
 import { Patient } from '../models/patient';
 import { SpirometryTest } from '../models/spirometry-test';
 import { checkInstant } from './check-instant';
@@ -33,6 +35,7 @@ export async function recordSpirometryTest(
     // one writer a patient at a time, so that summaries and flags see every test
     await Patient.findByPk(patient.id, { lock: true, attributes: ['id'] });
     const visitId = tests[0]?.visitId ?? randomUUID();
+    await refuseForeignVisit(patient, visitId);
     const created = await createOnce<SpirometryTest[]>(context, {
       kind: 'spirometry-test',
       id: key,
@@ -40,8 +43,10 @@ export async function recordSpirometryTest(
       find: (id) => findVisit(id, tests.length),
       create: async (id) => {
         const rows: SpirometryTest[] = [];
-        for (const test of tests)
-          rows.push(await writeOne(context, patient, test, test.id ?? (key ? randomUUID() : id), visitId));
+        for (const test of tests) {
+          const own = key === undefined && rows.length === 0 ? id : randomUUID();
+          rows.push(await writeOne(context, patient, test, test.id ?? own, visitId));
+        }
         await refreshCarriedHeights(context, patient);
         await refreshSummaries(context, patient);
         return rows;
@@ -71,9 +76,18 @@ async function writeOne(
   return row;
 }
 
+async function refuseForeignVisit(patient: Patient, visitId: string): Promise<void> {
+  const foreign = await SpirometryTest.findOne({ where: { visitId, patientId: { [Op.ne]: patient.id } } });
+  if (foreign) throw invalidInput({ path: 'visitId', message: 'This visit belongs to another patient' });
+}
+
 async function findVisit(id: string, count: number): Promise<SpirometryTest[] | null> {
   const first = await SpirometryTest.findByPk(id);
   if (!first) return null;
   if (count === 1) return [first];
-  return await SpirometryTest.findAll({ where: { visitId: first.visitId }, order: ['performedAt', 'createdAt'] });
+  return await SpirometryTest.findAll({
+    where: { visitId: first.visitId },
+    order: ['createdAt', 'performedAt', 'id'],
+    limit: count,
+  });
 }
