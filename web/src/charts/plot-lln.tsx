@@ -1,0 +1,31 @@
+import { LinePath } from '@visx/shape';
+import type { LlnLine } from './lln-line';
+import type { TrendLayout } from './trend-layout';
+
+interface PlotLlnProps {
+  layout: TrendLayout;
+  line: LlnLine;
+}
+
+/** The lower limit of normal on each day, carried flat to both edges and labeled with its latest value. */
+export const PlotLln = ({ layout: { frame, x, y }, line }: PlotLlnProps) => {
+  const at = line.points.map(({ day, value }) => ({ x: x(day), y: y(value) }));
+  const [first, last] = [at[0], at.at(-1)];
+  if (!first || !last) return null;
+  const path = [{ x: frame.left, y: first.y }, ...at, { x: frame.right, y: last.y }];
+  return (
+    <g>
+      <LinePath
+        data={path}
+        x={(point) => point.x}
+        y={(point) => point.y}
+        stroke="var(--heather)"
+        strokeWidth={1.6}
+        strokeDasharray="6 5"
+      />
+      <text x={frame.left + 8} y={first.y - 6} fontSize={13} fill="var(--heather)">
+        {line.label}
+      </text>
+    </g>
+  );
+};
