@@ -4,6 +4,7 @@ import path from 'node:path';
 import { pino, type Logger } from 'pino';
 import { createSessions, type Sessions } from './auth/session';
 import { AppError } from './errors/app-error';
+import type { Route } from './http/define-route';
 import { errorHandler } from './http/error-handler';
 import { mountRoutes } from './http/mount-routes';
 import { openApiDocument } from './http/openapi';
@@ -20,6 +21,8 @@ export interface AppOptions {
   publicOrigin?: string | undefined;
   trustProxy?: number;
   checkResponses?: boolean;
+  /** Routes beside the product's own, for measurements and tests of the machinery. */
+  extraRoutes?: readonly Route[];
 }
 
 export interface App {
@@ -32,7 +35,7 @@ export function createApp(options: AppOptions): App {
   const logger = options.logger ?? pino({ level: 'silent' });
   const isPublic = options.publicOrigin !== undefined;
   const sessions = createSessions({ secureCookies: isPublic });
-  const routes = allRoutes({ sessions, clock: options.clock });
+  const routes = [...allRoutes({ sessions, clock: options.clock }), ...(options.extraRoutes ?? [])];
   const app = express();
   app.disable('x-powered-by');
   app.set('trust proxy', options.trustProxy ?? 0);

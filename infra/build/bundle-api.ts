@@ -18,9 +18,14 @@ const workspacesInside: Plugin = {
 
 /** Bundles the API: a few milliseconds, and it starts in half the time it needs from TypeScript. */
 export async function bundleApi(): Promise<void> {
+  await bundle(path.join(projectRoot, 'api', 'src', 'main.ts'), apiEntry);
+}
+
+/** Bundles one entry file for Node. */
+export async function bundle(entry: string, outfile: string): Promise<void> {
   await build({
-    entryPoints: [path.join(projectRoot, 'api', 'src', 'main.ts')],
-    outfile: apiEntry,
+    entryPoints: [entry],
+    outfile,
     bundle: true,
     platform: 'node',
     format: 'esm',
