@@ -10,25 +10,26 @@ import type {
 import type { MeHome } from '@slighthill/shared/contracts/me';
 import type { duplicateList, patientList, patientResponse } from '@slighthill/shared/contracts/patient';
 import { http, HttpResponse, type JsonBodyType } from 'msw';
-import type { z } from 'zod';
 import { server } from './server';
+
+type Parsed<Schema extends { _output: unknown }> = Schema['_output'];
 
 /** What each address answers, by the contracts; a test cannot plan an answer the API could not give. */
 interface Answers {
-  'GET /api/auth/me': z.infer<typeof userResponse>;
-  'POST /api/auth/sign-in': z.infer<typeof userResponse>;
+  'GET /api/auth/me': Parsed<typeof userResponse>;
+  'POST /api/auth/sign-in': Parsed<typeof userResponse>;
   'POST /api/auth/sign-out': null;
   'POST /api/auth/activity': null;
   'POST /api/auth/invitation/look-up': Invitation;
-  'POST /api/auth/invitation/accept': z.infer<typeof userResponse>;
-  'GET /api/patients': z.infer<typeof patientList>;
-  'POST /api/patients': z.infer<typeof patientResponse>;
-  'POST /api/patients/duplicate-check': z.infer<typeof duplicateList>;
-  'GET /api/users': z.infer<typeof userList>;
-  'POST /api/users': z.infer<typeof staffUserCreated>;
-  'GET /api/programs': z.infer<typeof programList>;
-  'GET /api/clinic': z.infer<typeof clinicResponse>;
-  'GET /api/audit-events': z.infer<typeof auditList>;
+  'POST /api/auth/invitation/accept': Parsed<typeof userResponse>;
+  'GET /api/patients': Parsed<typeof patientList>;
+  'POST /api/patients': Parsed<typeof patientResponse>;
+  'POST /api/patients/duplicate-check': Parsed<typeof duplicateList>;
+  'GET /api/users': Parsed<typeof userList>;
+  'POST /api/users': Parsed<typeof staffUserCreated>;
+  'GET /api/programs': Parsed<typeof programList>;
+  'GET /api/clinic': Parsed<typeof clinicResponse>;
+  'GET /api/audit-events': Parsed<typeof auditList>;
   'GET /api/me/home': MeHome;
 }
 

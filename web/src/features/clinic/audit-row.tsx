@@ -18,7 +18,9 @@ export const AuditRow = ({ event, onPatient }: AuditRowProps) => {
       <Cell label="When" className="whitespace-nowrap">
         {formatInstant(event.at, timeZone)}
       </Cell>
-      <Cell label="Who">{event.actorName}</Cell>
+      <Cell label="Who" className="whitespace-nowrap">
+        {event.actorName}
+      </Cell>
       <Cell label="What">
         <span className="inline-flex flex-wrap items-center gap-2">
           {actionWords(event.action)}

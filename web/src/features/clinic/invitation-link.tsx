@@ -36,7 +36,13 @@ export const InvitationLink = ({ name, invitation, onDone }: InvitationLinkProps
           hint={`Send it to ${name} yourself. It is shown only now and works once, until ${formatInstant(invitation.expiresAt, timeZone)}.`}
           className="min-w-0 flex-1 basis-90"
         >
-          <TextInput readOnly value={link} onFocus={(event) => event.target.select()} className="bg-surface" />
+          <TextInput
+            readOnly
+            autoFocus
+            value={link}
+            onFocus={(event) => event.target.select()}
+            className="bg-surface"
+          />
         </Field>
         <div className="flex gap-2 pb-5.5">
           <Button icon="copy" onClick={() => void copy()}>

@@ -32,7 +32,7 @@ export const UserRow = ({ user, inviting, onEdit, onInvite }: UserRowProps) => (
     </Cell>
     <Cell className="whitespace-nowrap">
       <span className="flex justify-end gap-2 max-row:w-full max-row:justify-start max-row:pt-2">
-        {user.state === 'invited' && (
+        {user.state !== 'disabled' && (
           <Button
             size="row"
             saving={inviting}

@@ -15,6 +15,12 @@ const therapist: StaffUser = {
   state: 'active',
   version: 3,
 };
+const gone: StaffUser = {
+  ...therapist,
+  id: therapist.id.replace(/1$/, '3'),
+  displayName: 'Ana Brill',
+  state: 'disabled',
+};
 const invited: StaffUser = {
   ...therapist,
   id: therapist.id.replace(/1$/, '2'),
@@ -33,13 +39,13 @@ const openForm = async () => {
 };
 
 describe('users page', () => {
-  it('lists users with their roles and state', async () => {
-    answer('GET /api/users', { items: [therapist, invited], nextCursor: null });
+  it('lists users with their roles and state, and a new link only where it would work', async () => {
+    answer('GET /api/users', { items: [therapist, invited, gone], nextCursor: null });
     renderApp('/clinic/users', administrator);
     const row = (await screen.findByText('Jo Ferris')).closest('tr') as HTMLElement;
     expect(within(row).getByText('Therapist')).toBeVisible();
     expect(within(row).getByText('Active')).toBeVisible();
-    expect(screen.queryByRole('button', { name: 'New link for Jo Ferris' })).not.toBeInTheDocument();
+    expect(screen.queryByRole('button', { name: 'New link for Ana Brill' })).not.toBeInTheDocument();
     expect(screen.getByRole('button', { name: 'New link for Theo Kessel' })).toBeVisible();
   });
 

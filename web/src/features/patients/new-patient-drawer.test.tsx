@@ -57,6 +57,15 @@ describe('new patient', () => {
     expect(seen).toHaveLength(0);
   });
 
+  it('brings the reader to the first field in error, in the order of the form', async () => {
+    const { user } = renderApp('/patients/new', coordinator);
+    await user.type(await screen.findByLabelText('Given name'), 'Ruth');
+    await user.type(screen.getByLabelText('Family name'), 'Valdane');
+    await user.type(screen.getByLabelText('Date of birth'), '1961-05-17');
+    await user.click(screen.getByRole('button', { name: 'Save patient' }));
+    await waitFor(() => expect(screen.getByRole('radio', { name: 'Female' })).toHaveFocus());
+  });
+
   it('asks about someone with the same name and birth date, and never blocks saving', async () => {
     const known = { ...createdPatient(id), id: listed(5).id, recordNumber: 'A-5' };
     const checks = answer('POST /api/patients/duplicate-check', { items: [known] });

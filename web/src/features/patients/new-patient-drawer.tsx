@@ -3,7 +3,6 @@ import {
   diagnosisGroupLabels,
   diagnosisGroups,
   patientCreate,
-  type DiagnosisGroup,
   type SexForPrediction,
 } from '@slighthill/shared/contracts/patient';
 import { useId, useState } from 'react';
@@ -131,15 +130,22 @@ export const Component = () => {
             />
           </div>
         )}
-        <Field label="Diagnosis group" error={errors.diagnosisGroup?.message}>
-          <Select
-            {...register('diagnosisGroup', {
-              setValueAs: (value: string) => (value === '' ? undefined : (value as DiagnosisGroup)),
-            })}
-            emptyLabel="Choose one"
-            choices={choicesOf(diagnosisGroups, diagnosisGroupLabels)}
-          />
-        </Field>
+        <Controller
+          control={control}
+          name="diagnosisGroup"
+          render={({ field }) => (
+            <Field label="Diagnosis group" error={errors.diagnosisGroup?.message}>
+              <Select
+                ref={field.ref}
+                value={field.value ?? ''}
+                onChange={field.onChange}
+                onBlur={field.onBlur}
+                emptyLabel="Choose one"
+                choices={choicesOf(diagnosisGroups, diagnosisGroupLabels)}
+              />
+            </Field>
+          )}
+        />
         <Field
           label="Record number"
           labelNote="optional"
