@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { addDays, dayNumber, daysBetween, parseDate, wholeYears } from './calendar';
+import { addDays, dateInWords, dayNumber, daysBetween, fromDayNumber, parseDate, wholeYears } from './calendar';
 
 // Rule 0.5.
 it.each([
@@ -23,6 +23,20 @@ describe('calendar dates', () => {
 
   it.each(['2025-02-29', '2025-13-01', '2025-1-1', '', '2025-00-10', '20250101'])('refuses "%s"', (text) => {
     expect(() => parseDate(text)).toThrow(RangeError);
+  });
+
+  it('agrees with the calendar of the platform on every day of four centuries', () => {
+    const first = Date.UTC(1799, 11, 31) / 86_400_000;
+    for (let day = first; day < first + 146_100; day += 1) {
+      const date = fromDayNumber(day);
+      if (dayNumber(date) !== day) throw new Error(date);
+    }
+    expect(dayNumber('2000-02-29') + 1).toBe(dayNumber('2000-03-01'));
+    expect(() => parseDate('1900-02-29')).toThrow(RangeError);
+  });
+
+  it('prints a date in words', () => {
+    expect(dateInWords('2026-10-02')).toBe('Oct 2, 2026');
   });
 
   it('counts days from 1970', () => {

@@ -7,21 +7,36 @@ export interface CalendarDate {
   day: number;
 }
 
-/** Splits a date; throws RangeError when the text is not a day of the calendar. */
-export function parseDate(text: string): CalendarDate {
-  const match = /^(\d{4})-(\d{2})-(\d{2})$/.exec(text);
-  if (match) {
-    const [year, month, day] = [Number(match[1]), Number(match[2]), Number(match[3])];
-    const instant = new Date(Date.UTC(year, month - 1, day));
-    if (instant.getUTCMonth() === month - 1 && instant.getUTCDate() === day) return { year, month, day };
+const daysInMonth = [31, 28, 31, 30, 31, 30, 31, 31, 30, 31, 30, 31] as const;
+const isLeap = (year: number): boolean => (year % 4 === 0 && year % 100 !== 0) || year % 400 === 0;
+
+/** The number written in some digits of a text, NaN when one of them is no digit. */
+function digits(text: string, from: number, to: number): number {
+  let number = 0;
+  for (let index = from; index < to; index += 1) {
+    const digit = text.charCodeAt(index) - 48;
+    if (!(digit >= 0 && digit <= 9)) return Number.NaN;
+    number = number * 10 + digit;
   }
-  throw new RangeError(`Not a calendar date: ${text}`);
+  return number;
 }
 
-/** Days since 1970-01-01. */
+/** Splits a date; throws RangeError when the text is not a day of the calendar. Read often, so without a pattern. */
+export function parseDate(text: string): CalendarDate {
+  const [year, month, day] = [digits(text, 0, 4), digits(text, 5, 7), digits(text, 8, 10)];
+  const shaped = text.length === 10 && text[4] === '-' && text[7] === '-';
+  const lastDay = month === 2 && isLeap(year) ? 29 : (daysInMonth[month - 1] ?? 0);
+  if (!shaped || !(year >= 0) || !(day >= 1 && day <= lastDay)) throw new RangeError(`Not a calendar date: ${text}`);
+  return { year, month, day };
+}
+
+/** Days since 1970-01-01, counted in years that begin in March so that a leap day is the last of its year. */
 export function dayNumber(date: string): number {
   const { year, month, day } = parseDate(date);
-  return Date.UTC(year, month - 1, day) / msPerDay;
+  const marchYear = month > 2 ? year : year - 1;
+  const dayOfYear = Math.floor((153 * ((month + 9) % 12) + 2) / 5) + day - 1;
+  const leapDays = Math.floor(marchYear / 4) - Math.floor(marchYear / 100) + Math.floor(marchYear / 400);
+  return marchYear * 365 + leapDays + dayOfYear - 719_468;
 }
 
 export const fromDayNumber = (day: number): string => new Date(day * msPerDay).toISOString().slice(0, 10);

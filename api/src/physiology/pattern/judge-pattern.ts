@@ -76,7 +76,8 @@ export function judgePattern(test: PatternTest, rules: PatternRules): JudgedPatt
   };
 }
 
-function patternBy(rule: RatioRule, test: PatternTest): PatternId {
+/** The pattern alone, by one ratio rule. */
+export function patternBy(rule: RatioRule, test: PatternTest): PatternId {
   return patternOf({
     ratioLow: rule === 'lln' ? test.ratioLowByLln : test.ratioLowByFixed,
     fvcLow: test.fvc.belowLln,

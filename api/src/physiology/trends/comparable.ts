@@ -14,7 +14,7 @@ export interface Comparable {
   example: TrendMeasurement | null;
   blocking: string;
   /** One result a day, oldest first (rule TR-1 c). */
-  days: TrendMeasurement[];
+  days: readonly TrendMeasurement[];
   pair: Pair<TrendMeasurement>;
 }
 

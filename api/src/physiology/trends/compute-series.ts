@@ -32,7 +32,15 @@ export function computeSeries(
   const shown = results.filter((result) => result.quality !== 'F');
   const comparable = chooseComparable(measure, shown, window, options);
   const includeLowQuality = options.includeLowQuality ?? false;
-  const context: PointContext = { measure, rule, comparable, includeLowQuality, gradesFev1: patterns.gradesFev1 };
+  const compared = new Set(comparable.days);
+  const context: PointContext = {
+    measure,
+    rule,
+    comparable,
+    compared,
+    includeLowQuality,
+    gradesFev1: patterns.gradesFev1,
+  };
   const evaluated = shown.map((result) => ({ result, evaluation: evaluator.evaluate(result) }));
   const points = evaluated.map(({ result, evaluation }) => pointOf(result, evaluation, context));
   const { baseline, latest, note } = comparable.pair;

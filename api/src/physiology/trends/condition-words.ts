@@ -6,11 +6,22 @@ type Conditions = Readonly<Record<string, unknown>>;
 export const conditionValue = (condition: Condition, key: string, conditions: Conditions): unknown =>
   conditions[key] ?? condition.default ?? null;
 
+const blockingOf = new Map<string, readonly (readonly [string, Condition])[]>();
+
+/** The conditions of a measure in which compared results must agree; read for every point, so kept. */
+export function blockingConditions(measure: Measure): readonly (readonly [string, Condition])[] {
+  const found = blockingOf.get(measure.id);
+  if (found) return found;
+  const blocking = Object.entries(measure.conditions).filter(([, condition]) => condition.onDifference === 'blocks');
+  blockingOf.set(measure.id, blocking);
+  return blocking;
+}
+
 /** What must be equal for two results of a measure to be compared, besides the bronchodilator state. */
 export function blockingKey(measure: Measure, conditions: Conditions): string {
   let key = '';
-  for (const [name, condition] of Object.entries(measure.conditions))
-    if (condition.onDifference === 'blocks') key += `${name}=${String(conditionValue(condition, name, conditions))};`;
+  for (const [name, condition] of blockingConditions(measure))
+    key += `${name}=${String(conditionValue(condition, name, conditions))};`;
   return key;
 }
 
@@ -24,8 +35,7 @@ export function valueWords(condition: Condition, value: unknown): string {
 
 /** "course length 20 m instead of 30 m": the blocking conditions in which a result differs from the compared ones. */
 export function blockingDifference(measure: Measure, conditions: Conditions, compared: Conditions): string {
-  return Object.entries(measure.conditions)
-    .filter(([, condition]) => condition.onDifference === 'blocks')
+  return blockingConditions(measure)
     .map(([name, condition]) => ({
       condition,
       value: conditionValue(condition, name, conditions),

@@ -14,6 +14,8 @@ export interface PointContext {
   measure: Measure;
   rule: GradingRule | null;
   comparable: Comparable;
+  /** The days of `comparable`, for looking up. */
+  compared: ReadonlySet<TrendMeasurement>;
   includeLowQuality: boolean;
   gradesFev1: (sourceId: string) => boolean;
 }
@@ -21,12 +23,12 @@ export interface PointContext {
 /** Why a result is not compared (rule TR-1), or null when it is. */
 export function notComparedReason(result: TrendMeasurement, context: PointContext): string | null {
   const { measure, comparable } = context;
+  if (context.compared.has(result)) return null;
   if (!qualityCounts(result.quality, context.includeLowQuality)) return `quality ${result.quality}`;
   const state = stateOf(measure, result);
   if (state !== null && state !== comparable.state) return stateReasons[state];
   if (comparable.example && blockingKey(measure, result.conditions) !== comparable.blocking)
     return blockingDifference(measure, result.conditions, comparable.example.conditions);
-  if (comparable.days.includes(result)) return null;
   return measure.sameDay === 'best' ? 'the best of the day counts' : 'the last of the day counts';
 }
 
@@ -58,14 +60,13 @@ export function pointOf(result: TrendMeasurement, evaluation: Evaluation, contex
   const noPrediction = evaluation.reason && context.measure.referenceKind ? predictionReasons[evaluation.reason] : null;
   const reason = notCompared ?? noPrediction;
   const { pair } = context.comparable;
-  return {
+  const point: TrendPoint = {
     takenAt: result.takenAt,
     takenOn: result.takenOn,
     value: result.value,
     predicted: prediction?.predicted ?? null,
     percentPredicted: assessed?.percentPredicted ?? null,
     z: assessed?.z ?? null,
-    ...(assessed?.zApproximate == null ? {} : { zApproximate: assessed.zApproximate }),
     lln: prediction?.lln ?? null,
     uln: prediction?.uln ?? null,
     band: band?.id ?? null,
@@ -75,7 +76,6 @@ export function pointOf(result: TrendMeasurement, evaluation: Evaluation, contex
     quality: result.quality,
     compared: notCompared === null,
     role: result === pair.baseline ? 'baseline' : result === pair.latest ? 'latest' : null,
-    ...(reason === null ? {} : { reason }),
     heightCm: result.heightCm,
     heightMethod: result.heightMethod,
     heightCarried: result.heightCarried,
@@ -85,4 +85,7 @@ export function pointOf(result: TrendMeasurement, evaluation: Evaluation, contex
     sourceKind: result.sourceKind,
     sourceId: result.sourceId,
   };
+  if (assessed?.zApproximate != null) point.zApproximate = assessed.zApproximate;
+  if (reason !== null) point.reason = reason;
+  return point;
 }

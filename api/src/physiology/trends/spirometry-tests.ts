@@ -1,6 +1,5 @@
 import { daysBetween } from '@slighthill/shared/calendar';
-import { judgePattern, type BronchodilatorState, type Judged, type PatternRules } from '../pattern/judge-pattern';
-import type { JudgedPattern } from '../pattern/judge-pattern';
+import type { BronchodilatorState, Judged, PatternTest } from '../pattern/judge-pattern';
 import { isBelowFixedRatio } from '../spirometry/fixed-ratio';
 import { qualityCounts } from './comparable';
 import type { Evaluator } from './evaluator';
@@ -38,14 +37,16 @@ export function spirometryTests(measurements: readonly TrendMeasurement[]): Spir
   return tests;
 }
 
-/** The TLC nearest in time to a day, whatever the distance; of two as near the newer. */
+/** The TLC nearest in time to a day, whatever the distance; of two as near the newer. They are oldest first. */
 export function nearestTlc(tlcs: readonly TrendMeasurement[], takenOn: string): TrendMeasurement | null {
-  let nearest: { tlc: TrendMeasurement; days: number } | null = null;
-  for (const tlc of tlcs) {
-    const days = Math.abs(daysBetween(tlc.takenOn, takenOn));
-    if (nearest === null || days <= nearest.days) nearest = { tlc, days };
-  }
-  return nearest?.tlc ?? null;
+  const after = tlcs.findIndex((tlc) => tlc.takenOn > takenOn);
+  const later = after === -1 ? null : (tlcs[after] ?? null);
+  const earlier = tlcs[(after === -1 ? tlcs.length : after) - 1] ?? null;
+  if (!earlier || !later) return earlier ?? later;
+  const [back, ahead] = [daysBetween(earlier.takenOn, takenOn), daysBetween(takenOn, later.takenOn)];
+  if (back < ahead) return earlier;
+  // Of several on the nearest later day the last.
+  return tlcs.findLast((tlc) => tlc.takenOn === later.takenOn) ?? later;
 }
 
 export function judged(evaluator: Evaluator, result: TrendMeasurement): Judged | null {
@@ -55,24 +56,22 @@ export function judged(evaluator: Evaluator, result: TrendMeasurement): Judged |
   return { value: result.value, percentPredicted, z, belowLln };
 }
 
-/** Pattern of one test with a TLC near enough, or null where its values have no prediction. */
-export function patternOfTest(
+/** One test as the pattern rules look at it, or null where its values have no prediction. */
+export function patternTest(
   test: SpirometryTest,
   tlc: TrendMeasurement | null,
   evaluator: Evaluator,
-  rules: PatternRules,
-): JudgedPattern | null {
-  const [fev1, fvc, ratio] = [test.fev1, test.fvc, test.ratio].map((result) => judged(evaluator, result));
+): PatternTest | null {
+  const fev1 = judged(evaluator, test.fev1);
+  const fvc = judged(evaluator, test.fvc);
+  const ratio = judged(evaluator, test.ratio);
   if (!fev1 || !fvc || !ratio) return null;
-  return judgePattern(
-    {
-      ratioLowByFixed: isBelowFixedRatio(test.fev1.value * 1000, test.fvc.value * 1000),
-      ratioLowByLln: ratio.belowLln,
-      fev1,
-      fvc,
-      tlc: tlc && judged(evaluator, tlc),
-      state: test.state,
-    },
-    rules,
-  );
+  return {
+    ratioLowByFixed: isBelowFixedRatio(test.fev1.value * 1000, test.fvc.value * 1000),
+    ratioLowByLln: ratio.belowLln,
+    fev1,
+    fvc,
+    tlc: tlc && judged(evaluator, tlc),
+    state: test.state,
+  };
 }

@@ -1,9 +1,9 @@
 import { dateInWords, daysBetween } from '@slighthill/shared/calendar';
 import { formatNumber, formatPercentPredicted } from '@slighthill/shared/format';
-import { goldApplies, type PatternRules } from '../pattern/judge-pattern';
+import { goldApplies, judgePattern, patternBy, type PatternRules } from '../pattern/judge-pattern';
 import type { Evaluator } from './evaluator';
 import { stateReasons } from './reasons';
-import { nearestTlc, patternOfTest, spirometryTests, type SpirometryTest } from './spirometry-tests';
+import { nearestTlc, patternTest, spirometryTests, type SpirometryTest } from './spirometry-tests';
 import type { TrendMeasurement, TrendPattern } from './types';
 
 /** The pattern of the patient, and what each test's own pattern says about its grade. */
@@ -38,12 +38,9 @@ export function createPatterns(
     const found = graded.get(sourceId);
     if (found !== undefined) return found;
     const test = bySource.get(sourceId);
-    const pattern = test ? patternOfTest(test, near(test), evaluator, rules) : null;
-    const asked =
-      rules.fev1Rule !== 'gold' ||
-      (pattern !== null &&
-        goldApplies({ ratioLowByFixed: pattern.lowByFixedRatio, state: test?.state ?? 'unknown' }, rules));
-    const grades = pattern !== null && pattern.id !== 'normal' && asked;
+    const seen = test ? patternTest(test, near(test), evaluator) : null;
+    const asked = seen !== null && (rules.fev1Rule !== 'gold' || goldApplies(seen, rules));
+    const grades = asked && patternBy(rules.ratioRule, seen) !== 'normal';
     graded.set(sourceId, grades);
     return grades;
   }
@@ -68,9 +65,10 @@ function currentPattern(
   context: PatternContext,
 ): TrendPattern | null {
   const { evaluator, rules } = context;
-  const pattern = patternOfTest(test, tlc, evaluator, rules);
+  const seen = patternTest(test, tlc, evaluator);
   const set = evaluator.setOf('fev1');
-  if (!pattern || !set) return null;
+  if (!seen || !set) return null;
+  const pattern = judgePattern(seen, rules);
   return {
     ...pattern,
     notes: [...extraNotes(test, tlc, context), ...pattern.notes],
