@@ -12,6 +12,20 @@ const sources = ['web', 'shared/src', 'shared/package.json', 'package-lock.json'
 export const webDist = path.join(projectRoot, 'web', 'dist');
 const stampFile = path.join(webDist, '.sources');
 
+/** Puts a whole build in place of the former one, so that a running server never serves half of two. */
+function swapIn(built: string): void {
+  for (let attempt = 1; ; attempt++) {
+    rmSync(webDist, { recursive: true, force: true });
+    try {
+      renameSync(built, webDist);
+      return;
+    } catch (error) {
+      // Another command may have put its build there in between.
+      if ((error as NodeJS.ErrnoException).code !== 'ENOTEMPTY' || attempt === 5) throw error;
+    }
+  }
+}
+
 async function viteBuild(signal?: AbortSignal): Promise<void> {
   const next = path.join(dataDir, `web-build-${process.pid}`);
   mkdirSync(dataDir, { recursive: true });
@@ -23,9 +37,7 @@ async function viteBuild(signal?: AbortSignal): Promise<void> {
       ...(signal ? { signal } : {}),
     });
     if (result.code !== 0) throw new UserError(`The web app could not be built:\n${result.output.trim()}`);
-    // Swapped in whole, so that a running server never serves half of two builds.
-    rmSync(webDist, { recursive: true, force: true });
-    renameSync(next, webDist);
+    swapIn(next);
   } finally {
     rmSync(next, { recursive: true, force: true });
   }

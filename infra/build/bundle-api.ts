@@ -1,5 +1,6 @@
 import { build } from 'esbuild';
 import type { Plugin } from 'esbuild';
+import { mkdirSync, renameSync, writeFileSync } from 'node:fs';
 import { createRequire } from 'node:module';
 import path from 'node:path';
 import { projectRoot } from '../lib/project-paths';
@@ -23,7 +24,7 @@ export async function bundleApi(): Promise<void> {
 
 /** Bundles one entry file for Node. */
 export async function bundle(entry: string, outfile: string): Promise<void> {
-  await build({
+  const { outputFiles } = await build({
     entryPoints: [entry],
     outfile,
     bundle: true,
@@ -34,5 +35,13 @@ export async function bundle(entry: string, outfile: string): Promise<void> {
     sourcemap: true,
     logLevel: 'warning',
     plugins: [workspacesInside],
+    write: false,
   });
+  mkdirSync(path.dirname(apiEntry), { recursive: true });
+  for (const file of outputFiles) {
+    // Renamed into place: two commands may bundle at once, and none may read half a file.
+    const unfinished = `${file.path}.${process.pid}`;
+    writeFileSync(unfinished, file.contents);
+    renameSync(unfinished, file.path);
+  }
 }

@@ -12,7 +12,9 @@ async function create(options: ClinicOptions) {
     return await createClinic(options, { clock: { now: () => new Date() } });
   } catch (error) {
     if (!(error instanceof AppError)) throw error;
-    const fields = (error.errors ?? []).map(({ path, message }) => `  ${path}: ${message}`);
+    const fields = (error.errors ?? [])
+      .filter(({ message }) => !error.message.includes(message))
+      .map(({ path, message }) => `  ${path}: ${message}`);
     throw new UserError([error.message, ...fields].join('\n'));
   }
 }

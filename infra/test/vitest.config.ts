@@ -47,7 +47,7 @@ export default defineConfig({
           environment: 'node',
           include: ['**/*.test.ts'],
           globalSetup: [inRoot('infra/test/api-setup.ts')],
-          testTimeout: 60_000,
+          testTimeout: 120_000,
           hookTimeout: 60_000,
         },
       },
