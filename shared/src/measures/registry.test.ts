@@ -157,9 +157,44 @@ describe('derived measures', () => {
     const compute = (id: MeasureId) => getMeasure(id).derivedFrom?.compute;
     expect(compute('fev1fvc')?.({ fev1: 1.32, fvc: 2.78 }, null)).toBeCloseTo(0.47482, 6); // rule SP-1
     expect(compute('rvtlc')?.({ rv: 3.6, tlc: 7.4 }, null)).toBeCloseTo(48.6, 1); // rule LV-1
-    expect(compute('bmi')?.({ weight: 78 }, 172)).toBeCloseTo(26.3656, 4); // rule OM-4
     expect(compute('bmi')?.({ weight: 78 }, null)).toBeNull();
   });
+});
+
+// Rule OM-4.
+it.each([
+  [78, 172, 26.3656],
+  [53.8, 160, 21.0156],
+  [53.76, 160, 21],
+  [95, 168, 33.6593],
+])('BMI of %d kg and %d cm', (weight, heightCm, expected) => {
+  expect(getMeasure('bmi').derivedFrom?.compute({ weight }, heightCm)).toBeCloseTo(expected, 4);
+});
+
+// Rule 0.7: plausible and absolute ranges, in display units.
+it.each([
+  ['fev1', [0.3, 6], [0.1, 8]],
+  ['fvc', [0.6, 8], [0.2, 10]],
+  ['pef', [0.8, 14], [0.2, 20]],
+  ['fef2575', [0.1, 8], [0.03, 12]],
+  ['tlc', [2, 11], [1, 14]],
+  ['rv', [0.5, 6], [0.2, 10]],
+  ['frc', [1, 8], [0.4, 12]],
+  ['ic', [0.5, 7], [0.2, 10]],
+  ['vc', [0.5, 7], [0.2, 10]],
+  ['erv', [0.1, 3], [0, 5]],
+  ['rvtlc', [15, 80], [5, 95]],
+  ['dlco', [3, 45], [0.5, 70]],
+  ['kco', [1, 8], [0.2, 12]],
+  ['va', [1.5, 10], [0.5, 14]],
+  ['spo2Nadir', [70, 100], [40, 100]],
+  ['weight', [35, 180], [20, 350]],
+  ['sixMinuteWalkDistance', [50, 750], [0, 1000]],
+  ['shuttleWalkDistance', [20, 800], [0, 1020]],
+  ['sitToStandOneMinute', [3, 60], [0, 80]],
+] as const)('%s has the ranges of rule 0.7', (id, plausible, absolute) => {
+  expect(getMeasure(id).plausible).toEqual({ min: plausible[0], max: plausible[1] });
+  expect(getMeasure(id).absolute).toEqual({ min: absolute[0], max: absolute[1] });
 });
 
 // Rule 0.6.

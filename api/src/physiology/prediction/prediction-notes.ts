@@ -7,6 +7,7 @@ import type { JudgedMeasures, PredictionRequest } from './types';
 const reasonWords: Partial<Record<NotPredictable, (set: string) => string>> = {
   'age-outside-set': (set) => `age is outside ${set}`,
   'no-weight': () => 'a weight is needed',
+  'size-outside-set': () => 'height and weight are outside what the equation covers',
   'no-equation': () => 'no equation is used for it',
 };
 

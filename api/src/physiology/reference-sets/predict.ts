@@ -4,7 +4,8 @@ import type { Predicted, ReferencePerson, ReferenceSet } from './types';
 /** Ages any prediction may be asked for; outside it is a mistake of the caller, not a gap of a set. */
 export const predictionAges = { from: 18, to: 100 } as const;
 
-export type NotPredictable = 'no-equation' | 'age-outside-set' | 'no-height' | 'no-weight' | 'no-group';
+export type NotPredictable =
+  'no-equation' | 'age-outside-set' | 'no-height' | 'no-weight' | 'no-group' | 'size-outside-set';
 
 export type Prediction = ({ computable: true } & Predicted) | { computable: false; reason: NotPredictable };
 
@@ -26,7 +27,10 @@ export function predict(
     throw new RangeError(`heightCm ${heightCm} must be ${heightLimitsCm.min} to ${heightLimitsCm.max}`);
   const reason = whyNot(set, measure, person);
   if (reason !== null || set === null) return { computable: false, reason: reason ?? 'no-equation' };
-  return { computable: true, ...set.evaluate(measure, person as ReferencePerson) };
+  const found = set.evaluate(measure, person as ReferencePerson);
+  // A linear equation can fall to 0 at the ends of height and weight, where it says nothing any more.
+  if (!(found.predicted > 0)) return { computable: false, reason: 'size-outside-set' };
+  return { computable: true, ...found };
 }
 
 function whyNot(

@@ -202,6 +202,12 @@ describe('what has no prediction says why', () => {
     ['nhanes-iii-1999', 'fev1', { ...man, ageYears: 81, group: 'caucasian' }, 'age-outside-set'],
     ['enright-sherrill-1998', 'sixMinuteWalkDistance', { ...man, ageYears: 39, weightKg: 70 }, 'age-outside-set'],
     ['enright-sherrill-1998', 'sixMinuteWalkDistance', man, 'no-weight'],
+    [
+      'enright-sherrill-1998',
+      'sixMinuteWalkDistance',
+      { sex: 'male', ageYears: 80, heightCm: 120, weightKg: 300 },
+      'size-outside-set',
+    ],
     ['gli-global-2022', 'pef', man, 'no-equation'],
     ['gli-global-2022', 'fev1', { ...man, heightCm: null }, 'no-height'],
     ['gli-2012', 'fev1', man, 'no-group'],

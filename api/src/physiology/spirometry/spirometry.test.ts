@@ -1,5 +1,4 @@
 import { describe, expect, it } from 'vitest';
-import { bodyMassIndex } from '../body-mass-index';
 import { responseBy2021, respondsBy2005 } from './bronchodilator-response';
 import { fev1q } from './fev1q';
 
@@ -34,14 +33,4 @@ it.each([
 ] as const)('FEV1Q of a %s with %d L is %d', (sex, fev1L, expected) => {
   expect(fev1q(sex, fev1L)).toBeCloseTo(expected, 10);
   expect(() => fev1q(sex, 0)).toThrow(RangeError);
-});
-
-// Rule OM-4.
-it.each([
-  [78, 172, 26.3656],
-  [53.8, 160, 21.0156],
-  [53.76, 160, 21],
-  [95, 168, 33.6593],
-])('BMI of %d kg and %d cm', (kg, cm, expected) => {
-  expect(bodyMassIndex(kg, cm)).toBeCloseTo(expected, 4);
 });

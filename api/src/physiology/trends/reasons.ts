@@ -15,5 +15,6 @@ export const predictionReasons: Record<NotPredictable, string> = {
   'age-outside-set': 'age is outside the reference set',
   'no-height': 'no measured height up to 12 months earlier',
   'no-weight': 'no weight on record',
+  'size-outside-set': 'height and weight are outside what the equation covers',
   'no-group': 'the reference set needs a group',
 };
