@@ -29,6 +29,7 @@ interface Answers {
   'POST /api/users': Parsed<typeof staffUserCreated>;
   'GET /api/programs': Parsed<typeof programList>;
   'GET /api/clinic': Parsed<typeof clinicResponse>;
+  'PATCH /api/clinic': Parsed<typeof clinicResponse>;
   'GET /api/audit-events': Parsed<typeof auditList>;
   'GET /api/me/home': MeHome;
 }
@@ -60,7 +61,7 @@ const respond = (value: unknown): Response => {
 export const answer = <At extends Address>(at: At, ...answers: [Answer<At>, ...Answer<At>[]]): SeenRequest[] => {
   const seen: SeenRequest[] = [];
   const [method = 'GET', path = '/'] = at.split(' ');
-  const handle = http[method === 'GET' ? 'get' : 'post'];
+  const handle = http[method === 'GET' ? 'get' : method === 'PATCH' ? 'patch' : 'post'];
   server.use(
     handle(`*${path}`, async ({ request }) => {
       const text = await request.text();

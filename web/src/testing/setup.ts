@@ -4,8 +4,8 @@ import { format } from 'node:util';
 import { afterAll, afterEach, beforeAll, beforeEach, expect, vi } from 'vitest';
 import { server } from './server';
 
-// The first test of a file also waits for the pages it loads on demand.
-configure({ asyncUtilTimeout: 5000 });
+// The first test of a file also waits for the pages it loads on demand, on a machine that may be busy.
+configure({ asyncUtilTimeout: 12_000 });
 
 const complaints: string[] = [];
 

@@ -9,7 +9,7 @@ interface UnsavedWorkDialogProps {
 export const UnsavedWorkDialog = ({ work }: UnsavedWorkDialogProps) => (
   <Dialog
     title="Leave without saving?"
-    description="What you typed here is not in the record yet."
+    description="What you changed here is not saved yet."
     open={work.asking}
     onClose={work.stay}
     actions={

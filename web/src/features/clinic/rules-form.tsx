@@ -8,6 +8,7 @@ import { Field } from '../../ui/field';
 import { FormProblem } from '../../ui/form-problem';
 import { NumberInput } from '../../ui/number-input';
 import { RadioGroup } from '../../ui/radio-group';
+import { SavedNote } from '../../ui/saved-note';
 import { TextInput } from '../../ui/text-input';
 import { UnsavedWorkDialog } from '../../ui/unsaved-work-dialog';
 import { useUnsavedWork } from '../../ui/use-unsaved-work';
@@ -16,6 +17,9 @@ import { fev1Choices, ratioChoices, tlcChoices } from './rule-choices';
 
 interface RulesFormProps {
   clinic: Clinic;
+  /** Where the last save went; null before one. */
+  saved: string | null;
+  onSaved: () => void;
 }
 
 const fields = [
@@ -28,28 +32,37 @@ const fields = [
   'tlcWindowDays',
 ] as const;
 
+const startValues = (clinic: Clinic) => ({
+  version: clinic.version,
+  name: clinic.name,
+  timeZone: clinic.timeZone,
+  phone: clinic.phone ?? '',
+  ratioRule: clinic.ratioRule,
+  fev1SeverityRule: clinic.fev1SeverityRule,
+  tlcSeverityRule: clinic.tlcSeverityRule,
+  tlcWindowDays: clinic.tlcWindowDays,
+});
+
 const block = 'flex flex-col gap-5 border-t border-rule py-5';
 
 /** Grades are computed when they are shown, so a changed rule is seen at once; signed pages keep theirs. */
-export const RulesForm = ({ clinic }: RulesFormProps) => {
+export const RulesForm = ({ clinic, saved, onSaved }: RulesFormProps) => {
   const [problem, setProblem] = useState<string | null>(null);
   const change = useChangeClinic();
   const { register, control, handleSubmit, setError, formState } = useForm({
     resolver: zodResolver(clinicPatch),
-    defaultValues: { ...clinic, phone: clinic.phone ?? '' },
+    defaultValues: startValues(clinic),
   });
   const { errors, isDirty } = formState;
   const work = useUnsavedWork(isDirty);
 
-  const save = handleSubmit(
-    ({ name, timeZone, phone, ratioRule, fev1SeverityRule, tlcSeverityRule, tlcWindowDays }) => {
-      setProblem(null);
-      change.mutate(
-        { version: clinic.version, name, timeZone, phone, ratioRule, fev1SeverityRule, tlcSeverityRule, tlcWindowDays },
-        { onError: (error) => setProblem(applyProblem(error, setError, fields)) },
-      );
-    },
-  );
+  const save = handleSubmit((body) => {
+    setProblem(null);
+    change.mutate(body, {
+      onSuccess: onSaved,
+      onError: (error) => setProblem(applyProblem(error, setError, fields)),
+    });
+  });
 
   return (
     <form onSubmit={(event) => void save(event)} noValidate>
@@ -128,6 +141,7 @@ export const RulesForm = ({ clinic }: RulesFormProps) => {
       </section>
       <div className="flex flex-wrap items-center justify-end gap-3 border-t border-rule py-4">
         <FormProblem>{problem}</FormProblem>
+        <SavedNote>{isDirty ? null : saved}</SavedNote>
         <Button kind="main" type="submit" saving={change.isPending}>
           Save rules
         </Button>

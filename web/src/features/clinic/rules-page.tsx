@@ -1,4 +1,5 @@
 import { useQuery } from '@tanstack/react-query';
+import { useState } from 'react';
 import { describeProblem } from '../../lib/api-problem';
 import { usePageTitle } from '../../lib/page-title';
 import { ErrorNotice } from '../../ui/error-notice';
@@ -10,6 +11,7 @@ import { RulesForm } from './rules-form';
 export const Component = () => {
   usePageTitle('Rules');
   const query = useQuery(clinicQuery);
+  const [saved, setSaved] = useState<string | null>(null);
   return (
     <>
       <PageHeader title="Rules" note="How this clinic reads its tests" />
@@ -20,7 +22,14 @@ export const Component = () => {
             {`The rules could not be loaded. ${describeProblem(query.error)}`}
           </ErrorNotice>
         )}
-        {query.data && <RulesForm key={query.data.version} clinic={query.data} />}
+        {query.data && (
+          <RulesForm
+            key={query.data.version}
+            clinic={query.data}
+            saved={saved}
+            onSaved={() => setSaved('Saved. Grades shown from now on follow these rules.')}
+          />
+        )}
       </div>
     </>
   );
