@@ -33,7 +33,8 @@ export const trendPersonSql = /* sql */ `
 
 /** One indexed statement reads every current point, oldest first. */
 export const trendMeasurementsSql = /* sql */ `
-  select id, measure, taken_at as "takenAt", to_char(taken_at at time zone $timeZone, 'YYYY-MM-DD') as "takenOn",
+  select id, measure, to_char(taken_at at time zone 'UTC', 'YYYY-MM-DD"T"HH24:MI:SS.MS"Z"') as "takenAt",
+    to_char(taken_at at time zone $timeZone, 'YYYY-MM-DD') as "takenOn",
     value, state, conditions, quality, height_cm::float8 as "heightCm", height_method as "heightMethod",
     height_carried as "heightCarried", weight_kg::float8 as "weightKg", source_kind as "sourceKind",
     source_id as "sourceId", version
@@ -51,7 +52,7 @@ interface PersonRow {
   exacerbationOnsets: string[];
 }
 
-type MeasurementRow = Omit<TrendMeasurement, 'takenAt' | 'measure'> & { takenAt: Date; measure: string };
+type MeasurementRow = Omit<TrendMeasurement, 'measure'> & { measure: string };
 
 /** The measures the pattern is judged by are always read along. */
 const patternMeasures: readonly MeasureId[] = ['fev1', 'fvc', 'fev1fvc', 'tlc'];
@@ -72,11 +73,17 @@ export async function trendSource(
     measures: wanted,
   });
   const { enrollments, exacerbationOnsets, ...who } = person;
-  return { person: who, enrollments, exacerbationOnsets, measurements: rows.flatMap(toTrendMeasurement) };
+  return { person: who, enrollments, exacerbationOnsets, measurements: toDisplayUnits(rows) };
 }
 
-function toTrendMeasurement(row: MeasurementRow): TrendMeasurement[] {
-  const { measure } = row;
-  if (!isMeasureId(measure)) return [];
-  return [{ ...row, measure, value: fromStored(measure, row.value), takenAt: row.takenAt.toISOString() }];
+/** Rows of measures the registry no longer knows are left out; values come in the storage unit. */
+function isKnown(row: MeasurementRow): row is TrendMeasurement {
+  return isMeasureId(row.measure);
+}
+
+/** In place: there may be thousands of rows, and nobody else holds them. */
+function toDisplayUnits(rows: MeasurementRow[]): TrendMeasurement[] {
+  const known = rows.filter(isKnown);
+  for (const row of known) row.value = fromStored(row.measure, row.value);
+  return known;
 }
