@@ -1,0 +1,96 @@
+import { lazy, Suspense, useState } from 'react';
+import type { Patient } from '@slighthill/shared/contracts/patient';
+import { Link } from 'react-router-dom';
+import { Button } from '../../ui/button';
+import { Icon } from '../../ui/icon';
+import { Menu, type MenuItem } from '../../ui/menu';
+import { LoadingDrawer } from './forms/loading-drawer';
+import type { Saved } from './record-drawer';
+
+const drawers = {
+  spirometry: lazy(() => import('./spirometry/spirometry-drawer').then((m) => ({ default: m.SpirometryDrawer }))),
+  result: lazy(() => import('./result/result-drawer').then((m) => ({ default: m.ResultDrawer }))),
+  'body-size': lazy(() => import('./body-size/body-size-drawer').then((m) => ({ default: m.BodySizeDrawer }))),
+  file: lazy(() => import('./file/file-entry-drawer').then((m) => ({ default: m.FileEntryDrawer }))),
+};
+
+type DrawerName = keyof typeof drawers;
+
+const titles: Record<DrawerName, string> = {
+  spirometry: 'Record spirometry',
+  result: 'Record a result',
+  'body-size': 'Record body size',
+  file: 'Enter in the file',
+};
+
+interface RecordMenuProps {
+  patient: Patient;
+}
+
+/** The Record button of a patient's header and the drawers it opens; says where a saved entry went. */
+export const RecordMenu = ({ patient }: RecordMenuProps) => {
+  const [open, setOpen] = useState<DrawerName | null>(null);
+  const [saved, setSaved] = useState<Saved | null>(null);
+  const mayRecord = patient.abilities.includes('record');
+  const mayWriteFile = patient.abilities.includes('write-file') || patient.abilities.includes('order-oxygen');
+  if (!mayRecord && !mayWriteFile) return null;
+
+  const item = (name: DrawerName, label: string, note: string, icon: MenuItem['icon']): MenuItem => ({
+    label,
+    note,
+    ...(icon ? { icon } : {}),
+    onSelect: () => {
+      setSaved(null);
+      setOpen(name);
+    },
+  });
+  const items = [
+    ...(mayRecord
+      ? [
+          item('spirometry', 'Spirometry', 'Before and after bronchodilator', 'bars'),
+          item('result', 'Result', 'Walks, scores, lung volumes and more', 'note'),
+          item('body-size', 'Body size', 'Height and weight', 'person'),
+        ]
+      : []),
+    ...(mayWriteFile ? [item('file', 'File entry', 'Diagnosis, oxygen, medicine, holds', 'document')] : []),
+  ];
+  const Drawer = open ? drawers[open] : null;
+
+  return (
+    <div className="flex flex-wrap items-center justify-end gap-x-3 gap-y-1">
+      <p role="status" className="text-note">
+        {saved && (
+          <span className="flex items-center gap-2 text-fern">
+            <Icon name="check" size={18} />
+            <span>
+              {`Saved. ${saved.words}.`}{' '}
+              <Link to={saved.to} onClick={() => setSaved(null)} className="link">
+                Show it
+              </Link>
+            </span>
+          </span>
+        )}
+      </p>
+      <Menu
+        trigger={
+          <Button kind="main" icon="plus">
+            Record
+          </Button>
+        }
+        items={items}
+      />
+      {Drawer && open && (
+        <Suspense fallback={<LoadingDrawer title={titles[open]} onClose={() => setOpen(null)} />}>
+          <Drawer
+            patient={patient}
+            onClose={() => setOpen(null)}
+            onSaved={(next) => {
+              setSaved(next);
+              setOpen(null);
+            }}
+          />
+        </Suspense>
+      )}
+    </div>
+  );
+};
