@@ -4,6 +4,7 @@ import { warmPasswords } from './auth/passwords';
 import { readEnv } from './config/env';
 import { connectDatabase } from './db/connect';
 import { User } from './models/user';
+import { summariesSettled } from './services/follow-in-background';
 import { deleteExpiredDrafts } from './services/save-draft';
 import { systemClock } from './time/system-clock';
 
@@ -42,10 +43,12 @@ async function main(): Promise<void> {
     stopping = true;
     clearInterval(sweep);
     server.close(() => {
-      sequelize.close().then(
-        () => process.exit(0),
-        () => process.exit(1),
-      );
+      summariesSettled()
+        .then(() => sequelize.close())
+        .then(
+          () => process.exit(0),
+          () => process.exit(1),
+        );
     });
     server.closeIdleConnections();
     setTimeout(() => server.closeAllConnections(), 3_000).unref();

@@ -24,6 +24,7 @@ import { presentAuditEvent, presentClinic, presentProgram, presentStaffUser } fr
 import { findProgram, findStaffUser, listAuditEvents, listPrograms, listStaffUsers } from '../queries/clinic-lists';
 import type { IssuedLink } from '../services/invitations';
 import { addProgram, updateClinic, updateProgram } from '../services/manage-clinic';
+import { followInBackground } from '../services/follow-in-background';
 import { addUser, inviteAgain, updateUser } from '../services/manage-users';
 
 const page = z.strictObject(cursorQuery);
@@ -53,7 +54,12 @@ export const clinicRoutes: Route[] = [
     contract: { summary: 'Change the clinic or its default rules', body: clinicPatch, response: clinicResponse },
     access: 'clinic:manage',
     audit: 'clinic.change',
-    handler: async ({ context, body }) => ({ clinic: presentClinic(await updateClinic(context, body)) }),
+    handler: async ({ context, body }) => {
+      const { clinic, rulesChanged } = await updateClinic(context, body);
+      // records and trends follow at once; the summaries in lists are worked out again behind the answer
+      if (rulesChanged) followInBackground(clinic);
+      return { clinic: presentClinic(clinic) };
+    },
   }),
   defineRoute({
     method: 'get',

@@ -8,17 +8,24 @@ import { createOnce, type Created } from './create-once';
 import { given } from './given';
 import { lockForChange } from './lock-for-change';
 
-/** Changes the clinic's name, zone or default rules. Summaries follow with `npm run summaries:rebuild` or the next result. */
-export async function updateClinic(context: CommandContext, body: ClinicPatch): Promise<Clinic> {
+/** What summaries depend on besides the results themselves. */
+const ruleFields = ['timeZone', 'ratioRule', 'fev1SeverityRule', 'tlcSeverityRule', 'tlcWindowDays'] as const;
+
+/** Changes the clinic's name, zone or default rules; says whether summaries have to follow. */
+export async function updateClinic(
+  context: CommandContext,
+  body: ClinicPatch,
+): Promise<{ clinic: Clinic; rulesChanged: boolean }> {
   return await runCommand(context, async () => {
     const clinic = await Clinic.findByPk(context.actor.clinicId, { lock: true });
     if (!clinic) throw notFound();
     if (clinic.version !== body.version) throw staleVersion();
     const { version: _version, ...changes } = body;
     const kept = given(changes);
-    if (Object.keys(kept).length === 0) return clinic;
+    if (Object.keys(kept).length === 0) return { clinic, rulesChanged: false };
+    const rulesChanged = ruleFields.some((field) => kept[field] !== undefined && kept[field] !== clinic[field]);
     context.audit.about('clinic', clinic.id);
-    return await clinic.update({ ...kept, version: clinic.version + 1 });
+    return { clinic: await clinic.update({ ...kept, version: clinic.version + 1 }), rulesChanged };
   });
 }
 

@@ -2,6 +2,7 @@ import type { Sequelize } from 'sequelize';
 import { inTransaction } from '../db/in-transaction';
 import { selectRow, selectRows } from '../db/query';
 import { Clinic } from '../models/clinic';
+import { Patient } from '../models/patient';
 import { systemClock } from '../time/system-clock';
 import { refreshSummaries } from './refresh-summaries';
 
@@ -17,21 +18,31 @@ const storedSql = `
 export async function rebuildEnrollmentSummaries(
   _sequelize: Sequelize,
 ): Promise<{ rebuilt: number; differed: number }> {
-  let rebuilt = 0;
-  let differed = 0;
+  const total = { rebuilt: 0, differed: 0 };
   for (const clinic of await Clinic.findAll({ order: ['id'] })) {
-    const actor = { clinicId: clinic.id, clinic };
-    const patients = await selectRows<{ id: string }>(
-      'select distinct patient_id as id from enrollments where clinic_id = $clinicId order by 1',
-      { clinicId: clinic.id },
-    );
-    for (const { id } of patients) {
-      const before = await selectRow<Stored>(storedSql, { patientId: id });
-      await inTransaction(() => refreshSummaries({ actor, clock: systemClock }, { id }));
-      const after = await selectRow<Stored>(storedSql, { patientId: id });
-      rebuilt += 1;
-      if (before?.summaries !== after?.summaries) differed += 1;
-    }
+    const { rebuilt, differed } = await rebuildClinicSummaries(clinic);
+    total.rebuilt += rebuilt;
+    total.differed += differed;
   }
-  return { rebuilt, differed };
+  return total;
+}
+
+/** The same for one clinic, a patient at a time: also run after its default rules or time zone changed. */
+export async function rebuildClinicSummaries(clinic: Clinic): Promise<{ rebuilt: number; differed: number }> {
+  const actor = { clinicId: clinic.id, clinic };
+  const patients = await selectRows<{ id: string }>(
+    'select distinct patient_id as id from enrollments where clinic_id = $clinicId order by 1',
+    { clinicId: clinic.id },
+  );
+  let differed = 0;
+  for (const { id } of patients) {
+    const before = await selectRow<Stored>(storedSql, { patientId: id });
+    await inTransaction(async () => {
+      await Patient.findByPk(id, { lock: true, attributes: ['id'] });
+      await refreshSummaries({ actor, clock: systemClock }, { id });
+    });
+    const after = await selectRow<Stored>(storedSql, { patientId: id });
+    if (before?.summaries !== after?.summaries) differed += 1;
+  }
+  return { rebuilt: patients.length, differed };
 }
