@@ -68,10 +68,11 @@ describe('access', () => {
       const theirs = await statusesOf(key, { server, clinic: own, patientId: anotherRecord }, own);
       expect(theirs.statuses).toEqual(expected.own);
     }
-    const foreign = await statusesOf(key, { server, clinic: own, patientId: anotherRecord }, other);
+    const patientId = await addPatient(own);
+    const foreign = await statusesOf(key, { server, clinic: own, patientId }, other);
     expect(foreign.statuses).toEqual(expected.other);
     if (key.includes('/auth/')) return;
-    for (const secret of [own.clinic.id, own.program.id, own.users.therapist.id, anotherRecord])
+    for (const secret of [own.clinic.id, own.program.id, own.users.therapist.id, patientId, anotherRecord])
       expect(foreign.text).not.toContain(secret);
   });
 
