@@ -11,7 +11,7 @@ export const applyProblem = <Values extends FieldValues>(
   fields: readonly FieldPath<Values>[],
 ): string | null => {
   if (!(error instanceof ApiProblem)) return describeProblem(error);
-  if (error.isSignedOut) return 'Not saved. Continue with your password, then save again.';
+  if (error.isSignedOut) return 'Not saved: your sign-in had ended. What you typed is here; save it again.';
   if (error.isUnreachable) return 'Not saved: the server could not be reached. What you typed is here. Try again.';
   const rest: string[] = [];
   let placed = false;

@@ -24,6 +24,7 @@ interface Answers {
   'POST /api/auth/invitation/accept': Parsed<typeof userResponse>;
   'GET /api/patients': Parsed<typeof patientList>;
   'POST /api/patients': Parsed<typeof patientResponse>;
+  'GET /api/patients/:id': Parsed<typeof patientResponse>;
   'POST /api/patients/duplicate-check': Parsed<typeof duplicateList>;
   'GET /api/users': Parsed<typeof userList>;
   'POST /api/users': Parsed<typeof staffUserCreated>;

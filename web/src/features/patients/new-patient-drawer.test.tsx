@@ -18,6 +18,8 @@ const fillIn = async (user: ReturnType<typeof renderApp>['user']): Promise<void>
 beforeEach(() => {
   answer('GET /api/patients', { items: [listed(1)], nextCursor: null });
   answer('POST /api/patients/duplicate-check', { items: [] });
+  // The record that opens after saving has tests of its own.
+  answer('GET /api/patients/:id', problem('not-found', 'There is nothing at this address.'));
 });
 
 describe('new patient', () => {

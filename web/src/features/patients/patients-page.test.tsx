@@ -75,6 +75,13 @@ describe('patients page', () => {
     expect(seen.at(-1)?.url.searchParams.get('list')).toBe('finished');
   });
 
+  it('offers the first patient in the empty page, once', async () => {
+    answer('GET /api/patients', page([]));
+    renderApp('/patients?list=all', coordinator);
+    expect(await screen.findByText('There are no patients yet.')).toBeVisible();
+    expect(screen.getAllByRole('link', { name: 'New patient' })).toHaveLength(1);
+  });
+
   it('says what happened when the list cannot be loaded, and tries again', async () => {
     answer(
       'GET /api/patients',

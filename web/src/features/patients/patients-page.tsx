@@ -39,6 +39,8 @@ export const Component = () => {
   const query = useInfiniteQuery(patientListQuery(list, search));
   const patients = query.data?.pages.flatMap((page) => page.items) ?? [];
   const empty = query.isSuccess && patients.length === 0 && !query.isPlaceholderData;
+  // The first patient's button stands in the empty page itself; a page has one.
+  const offersFirst = empty && mayAdd && search === '' && list === 'all';
   const newPatient = (
     <ButtonLink kind="main" icon="plus" to={{ pathname: '/patients/new', search: params.toString() }}>
       New patient
@@ -71,7 +73,7 @@ export const Component = () => {
                 onValueChange={setTyped}
                 onLeaveDown={() => place.current?.querySelector<HTMLElement>('[data-row-link]')?.focus()}
               />
-              {mayAdd && newPatient}
+              {mayAdd && !offersFirst && newPatient}
             </>
           }
         />
@@ -83,11 +85,7 @@ export const Component = () => {
             </ErrorNotice>
           )}
           {patients.length > 0 && <PatientTable patients={patients} busy={query.isPlaceholderData} />}
-          {empty && (
-            <EmptyState action={search === '' && mayAdd && list === 'all' ? newPatient : undefined}>
-              {emptyWords(list, search)}
-            </EmptyState>
-          )}
+          {empty && <EmptyState action={offersFirst ? newPatient : undefined}>{emptyWords(list, search)}</EmptyState>}
           {query.hasNextPage && (
             <Button
               className="mt-5"
