@@ -1,11 +1,5 @@
-import {
-  fileEntryKindLabels,
-  medicineClasses,
-  oxygenDevices,
-  smokingStatuses,
-  type FileEntry,
-  type FileEntryKind,
-} from '@slighthill/shared/contracts/file-entry';
+import { fileEntryKindLabels, type FileEntry, type FileEntryKind } from '@slighthill/shared/contracts/file-entry';
+import type { medicineClasses, oxygenDevices, smokingStatuses } from '@slighthill/shared/contracts/file-entry';
 import { diagnosisGroupLabels, type DiagnosisGroup } from '@slighthill/shared/contracts/patient';
 import { formatNumber } from '@slighthill/shared/format';
 import { safetyItem, type SafetyItemId } from '@slighthill/shared/safety-checklist';
