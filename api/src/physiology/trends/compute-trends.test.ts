@@ -180,7 +180,7 @@ describe('one reference set per series, age and height of each test (rules TR-2,
     ).series;
     expect(fev1?.points[0]).toMatchObject({ percentPredicted: null, band: null, graded: false });
     expect(fev1?.notes).toContain('No percent predicted for 1 point: no measured height up to 12 months earlier.');
-    expect(walk?.notes).toContain('No percent predicted for 1 point: no weight on record.');
+    expect(walk?.notes).toContain('No percent predicted for 1 point: no weight was entered with the test.');
   });
 
   it('has no prediction past the ages of the set or past 100', () => {

@@ -14,7 +14,7 @@ export const predictionReasons: Record<NotPredictable, string> = {
   'no-equation': 'no equation is used for this measure',
   'age-outside-set': 'age is outside the reference set',
   'no-height': 'no measured height up to 12 months earlier',
-  'no-weight': 'no weight on record',
+  'no-weight': 'no weight was entered with the test',
   'size-outside-set': 'height and weight are outside what the equation covers',
   'no-group': 'the reference set needs a group',
 };
