@@ -2,7 +2,7 @@ import type { AddressInfo } from 'node:net';
 import type { Server } from 'node:http';
 import type { Sequelize } from 'sequelize';
 import request from 'supertest';
-import { createApp } from '../app';
+import { createApp, type AppOptions } from '../app';
 import type { Sessions } from '../auth/session';
 import { connectDatabase } from '../db/connect';
 import { testDatabaseUrl } from './database';
@@ -61,10 +61,10 @@ export interface TestServer {
 }
 
 /** The whole API on this worker's database, with every answer held to its contract. */
-export async function startTestServer(): Promise<TestServer> {
+export async function startTestServer(options: Pick<AppOptions, 'logger' | 'publicOrigin'> = {}): Promise<TestServer> {
   const clock = new TestClock();
   const sequelize = connectDatabase(await testDatabaseUrl(), { poolSize: 8 });
-  const { express, sessions } = createApp({ clock, checkResponses: true });
+  const { express, sessions } = createApp({ clock, checkResponses: true, ...options });
   const server = await new Promise<Server>((resolve) => {
     const listening = express.listen(0, '127.0.0.1', () => resolve(listening));
   });
