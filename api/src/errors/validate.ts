@@ -8,10 +8,23 @@ export function validate<S extends z.ZodType>(
   input: unknown,
   part: 'body' | 'query' | 'params',
 ): z.output<S> {
+  const unstorable = unstorableParts(input, '');
   const result = schema.safeParse(input);
-  if (result.success) return result.data;
+  if (result.success && unstorable.length === 0) return result.data;
   if (part === 'params') throw new AppError('not-found', 'There is nothing at this address.');
-  throw new AppError('invalid-input', 'Nothing was stored. Look at the fields named below.', inputErrors(result.error));
+  const errors = result.success ? unstorable : inputErrors(result.error);
+  throw new AppError('invalid-input', 'Nothing was stored. Look at the fields named below.', errors);
+}
+
+/** The one character PostgreSQL cannot keep in a text; refused here, so that it is neither a fault nor dropped. */
+function unstorableParts(input: unknown, path: string): InputError[] {
+  if (typeof input === 'string')
+    return input.includes('\0') ? [{ path, message: 'This holds a character that cannot be stored' }] : [];
+  if (typeof input !== 'object' || input === null) return [];
+  return Object.entries(input).flatMap(([key, value]) => {
+    const inner = path === '' ? key : `${path}.${key}`;
+    return [...unstorableParts(key, path), ...unstorableParts(value, inner)];
+  });
 }
 
 function inputErrors(error: z.ZodError): InputError[] {

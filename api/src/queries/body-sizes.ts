@@ -41,7 +41,7 @@ export async function listBodySizes<Item>(
   page: { cursor?: string | undefined; limit: number },
   present: (row: BodySizeRow) => Item,
 ) {
-  const [at, id] = decodeCursor(page.cursor, 2) ?? [null, null];
+  const [at, id] = decodeCursor(page.cursor, ['instant', 'id']) ?? [null, null];
   const rows = await selectRows<BodySizeRow>(
     `${sql('e.patient_id = $patientId and ($at::timestamptz is null or (e.taken_at, e.id) < ($at, $id::uuid))')}
      order by e.taken_at desc, e.id desc limit $limit`,

@@ -32,7 +32,7 @@ export async function findStaffUser(actor: Actor, id: string): Promise<StaffUser
 }
 
 export async function listStaffUsers<Item>(actor: Actor, page: Page, present: (row: StaffUserRow) => Item) {
-  const [name, id] = decodeCursor(page.cursor, 2) ?? [null, null];
+  const [name, id] = decodeCursor(page.cursor, ['text', 'id']) ?? [null, null];
   const rows = await selectRows<StaffUserRow>(
     `${userSql('($name::text is null or (display_name, id) > ($name, $id::uuid))')}
      order by display_name, id limit $limit`,
@@ -65,7 +65,7 @@ export async function findProgram(actor: Actor, id: string): Promise<ProgramRow 
 }
 
 export async function listPrograms<Item>(actor: Actor, page: Page, present: (row: ProgramRow) => Item) {
-  const [name, id] = decodeCursor(page.cursor, 2) ?? [null, null];
+  const [name, id] = decodeCursor(page.cursor, ['text', 'id']) ?? [null, null];
   const rows = await selectRows<ProgramRow>(
     `${programSql('($name::text is null or (name, id) > ($name, $id::uuid))')} order by name, id limit $limit`,
     { ...visibleTo(actor), name, id, limit: page.limit + 1 },
@@ -93,7 +93,7 @@ interface AuditFilter extends Page {
 
 /** The trail, newest first. Names and record numbers are looked up for the page alone, at most ten an event. */
 export async function listAuditEvents<Item>(actor: Actor, filter: AuditFilter, present: (row: AuditRow) => Item) {
-  const [before] = decodeCursor(filter.cursor, 1) ?? [null];
+  const [before] = decodeCursor(filter.cursor, ['serial']) ?? [null];
   const rows = await selectRows<AuditRow>(
     `with page as (
        select * from audit_events

@@ -36,7 +36,7 @@ export async function listFileEntries<Item>(
   page: { cursor?: string | undefined; limit: number; kind?: FileEntryKind | undefined },
   present: (row: FileEntryRow) => Item,
 ) {
-  const [on, id] = decodeCursor(page.cursor, 2) ?? [null, null];
+  const [on, id] = decodeCursor(page.cursor, ['date', 'id']) ?? [null, null];
   const rows = await selectRows<FileEntryRow>(
     `${sql(`e.patient_id = $patientId and ($kind::text is null or e.kind = $kind)
        and ($on::date is null or (e.on_date, e.id) < ($on::date, $id::uuid))`)}

@@ -35,7 +35,7 @@ interface Page {
  * with the clinic; what the rows show is joined for the page alone.
  */
 export async function listPatients<Item>(actor: Actor, page: Page, present: (row: PatientListRow) => Item) {
-  const after = decodeCursor(page.cursor, 4);
+  const after = decodeCursor(page.cursor, ['index', 'text', 'text', 'id']);
   const branches = searchBranches(page.search ?? '');
   const ids = branches.map((branch, index) => {
     const [a, b] = branch.sort;

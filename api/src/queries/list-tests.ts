@@ -65,7 +65,7 @@ export async function listTests<Item>(
   page: { cursor?: string | undefined; limit: number },
   present: (row: TestRow) => Item,
 ) {
-  const [at, id] = decodeCursor(page.cursor, 2) ?? [null, null];
+  const [at, id] = decodeCursor(page.cursor, ['instant', 'id']) ?? [null, null];
   const rows = await selectRows<TestRow>(sql, {
     ...visibleTo(actor),
     timeZone: actor.clinic.timeZone,

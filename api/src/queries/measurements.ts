@@ -48,7 +48,7 @@ export async function listMeasurements<Item>(
   page: { cursor?: string | undefined; limit: number; measure?: string | undefined },
   present: (row: MeasurementRow) => Item,
 ) {
-  const [at, id] = decodeCursor(page.cursor, 2) ?? [null, null];
+  const [at, id] = decodeCursor(page.cursor, ['instant', 'id']) ?? [null, null];
   const rows = await selectRows<MeasurementRow>(
     `${sql(`e.patient_id = $patientId and e.source_kind = 'measurement' and e.source_id = e.id
        and ($measure::text is null or e.measure = $measure)

@@ -75,7 +75,7 @@ export async function listSpirometryTests<Item>(
   page: { cursor?: string | undefined; limit: number },
   present: (row: SpirometryTestRow) => Item,
 ) {
-  const [at, id] = decodeCursor(page.cursor, 2) ?? [null, null];
+  const [at, id] = decodeCursor(page.cursor, ['instant', 'id']) ?? [null, null];
   const rows = await selectRows<SpirometryTestRow>(
     `${sql('e.patient_id = $patientId and ($at::timestamptz is null or (e.performed_at, e.id) < ($at, $id::uuid))')}
      order by e.performed_at desc, e.id desc limit $limit`,
