@@ -1,6 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { selectRow } from '../db/query';
-import { spirometryBody, walkBody } from '../testing/factories/bodies';
+import { spirometryBody } from '../testing/factories/bodies';
 import { makeClinic, type TestClinic } from '../testing/factories/clinic';
 import {
   addBodySize,

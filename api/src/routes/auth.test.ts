@@ -107,6 +107,13 @@ describe('signing in', () => {
     expect((await signIn(neighbor.email)).status).toBe(200);
   });
 
+  it('stops an address that fails for many accounts', async () => {
+    await signIn(`${newId()}@clinic.test`);
+    await execute(`update rate_limits set hits = 99 where key like 'sign-in-address:%'`);
+    expect((await signIn(`${newId()}@clinic.test`)).status).toBe(401);
+    expect((await signIn((await account()).email)).status).toBe(429);
+  });
+
   it('does not count successes as failures', async () => {
     const user = await account();
     for (let i = 0; i < 12; i += 1) expect((await signIn(user.email)).status).toBe(200);

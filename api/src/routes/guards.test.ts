@@ -9,6 +9,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { selectRow } from '../db/query';
 import { defineRoute, type Route } from '../http/define-route';
 import { errorHandler } from '../http/error-handler';
+import type { RequestContext } from '../http/request-context';
 import { mountRoutes } from '../http/mount-routes';
 import { Patient } from '../models/patient';
 import type { Actor } from '../policies/actor';
@@ -119,15 +120,22 @@ describe('PATCH that says nothing', () => {
 describe('the guard of routes about one row', () => {
   const params = z.strictObject({ id: z.string() });
   const response = z.object({ name: z.string() });
-  const route = (handler: Parameters<typeof defineRoute>[0]['handler'], access: 'signed-in' | 'users:manage'): Route =>
+  type Handler = (input: { context: RequestContext }) => Promise<{ name: string }>;
+  const route = (handler: Handler): Route =>
     defineRoute({
       method: 'get',
       path: '/api/things/:id',
       contract: { summary: 'A thing', params, response },
-      access,
+      access: 'signed-in',
       audit: 'thing.read',
       handler,
     });
+  const authorized =
+    (clinicId: string, name: unknown = 'x'): Handler =>
+    async ({ context }) => {
+      context.authorizeRow('users:manage', { clinicId }, 'This thing');
+      return { name: name as string };
+    };
 
   async function answerOf(thing: Route, who: Role): Promise<number> {
     const app = express();
@@ -147,34 +155,21 @@ describe('the guard of routes about one row', () => {
   it('fails an answer whose row nobody authorized', async () => {
     expect(
       await answerOf(
-        route(async () => ({ name: 'x' }), 'signed-in'),
-        'therapist',
+        route(async () => ({ name: 'x' })),
+        'administrator',
       ),
     ).toBe(500);
   });
 
   it('passes one whose row was authorized, and tells not-visible from not-allowed', async () => {
-    const handler =
-      (clinicId: string) =>
-      async ({ context }: { context: { authorizeRow: (...given: never[]) => unknown } }) => {
-        context.authorizeRow(...(['users:manage', { clinicId }, 'This thing'] as never[]));
-        return { name: 'x' };
-      };
-    const mine = route(handler(own.clinic.id) as never, 'signed-in');
-    const foreign = route(handler('4f6f1c0e-0000-4000-8000-000000000002') as never, 'signed-in');
+    const mine = route(authorized(own.clinic.id));
+    const foreign = route(authorized('4f6f1c0e-0000-4000-8000-000000000002'));
     expect(await answerOf(mine, 'administrator')).toBe(200);
     expect(await answerOf(mine, 'therapist')).toBe(403);
     expect(await answerOf(foreign, 'administrator')).toBe(404);
   });
 
   it('fails an answer that breaks its contract', async () => {
-    const broken = route(
-      (async ({ context }: never) => {
-        (context as { authorizeOwn: (ability: string) => void }).authorizeOwn('users:manage');
-        return { name: 7 };
-      }) as never,
-      'users:manage',
-    );
-    expect(await answerOf(broken, 'administrator')).toBe(500);
+    expect(await answerOf(route(authorized(own.clinic.id, 7)), 'administrator')).toBe(500);
   });
 });
