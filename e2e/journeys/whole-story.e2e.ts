@@ -35,7 +35,7 @@ const firstAfter: Blow[] = [
   { fev1: '1.10', fvc: '2.40' },
   { fev1: '1.24', fvc: '2.44', rejectedFor: 'Cough in the first second' },
 ];
-const secondBefore: Blow[] = [{ fev1: '1.28', fvc: '2.52' }];
+const secondBefore: Blow[] = [{ fev1: '1.16', fvc: '2.52' }];
 const secondAfter: Blow[] = [
   { fev1: '1.43', fvc: '2.60' },
   { fev1: '1.41', fvc: '2.58' },
@@ -70,7 +70,6 @@ async function firstSpirometry(page: Page): Promise<void> {
   const best = drawer.getByRole('region', { name: 'Best of this test' });
   // The rejected blow had the highest FEV1; it is not the best.
   await best.getByRole('row', { name: /^FEV1, L 1\.02 1\.10 .*47%/ }).waitFor();
-  await letStand(drawer);
   await picture(page, 'spirometry-form-filled');
   await expectAxeClean(page, 'spirometry form, filled');
   await drawer.getByRole('button', { name: 'Save test' }).click();
@@ -80,7 +79,8 @@ async function firstSpirometry(page: Page): Promise<void> {
 async function secondSpirometry(page: Page): Promise<void> {
   const drawer = await openRecordDrawer(page, 'Spirometry');
   await fillPair(drawer, { on: secondOn, heightCm: '165.1', before: secondBefore, after: secondAfter });
-  await letStand(drawer);
+  // FEV1 is far from the last one.
+  await letStand(drawer, 1);
   await drawer.getByRole('button', { name: 'Save test' }).click();
   await savedNote(page, /^Saved\. /);
 }
@@ -90,7 +90,6 @@ async function scores(page: Page, on: string, results: readonly (readonly [searc
   await drawer.getByLabel('Date and time').fill(`${on}T10:15`);
   for (const [index, [search, value]] of results.entries()) {
     await fillResult(drawer, search, value);
-    await letStand(drawer);
     const last = index === results.length - 1;
     await drawer.getByRole('button', { name: last ? 'Save result' : 'Save and add another' }).click();
     if (!last) await drawer.getByRole('status').getByText(new RegExp(`^In the record: (.*, ){${index}}[^,]+$`)).waitFor();
@@ -132,10 +131,10 @@ async function readPoints(page: Page): Promise<string[]> {
 async function chartAndTwin(page: Page): Promise<void> {
   const announced = await readPoints(page);
   expect(announced).toHaveLength(4);
-  expect(announced[1]).toMatch(
+  expect(announced.find((words) => words.includes(', baseline.'))).toMatch(
     new RegExp(`^${writtenDay(firstOn)}, baseline\\. FEV1 1\\.10 L, 47% of 2\\.36 L.*Severe, 35 to under 50.*64\\.5`),
   );
-  expect(announced[3]).toMatch(
+  expect(announced.find((words) => words.includes(', latest.'))).toMatch(
     new RegExp(`^${writtenDay(secondOn)}, latest\\. FEV1 1\\.43 L, 61% of 2\\.34 L.*Moderate, 60 to under 70.*165\\.1 cm`),
   );
   await page.getByRole('button', { name: 'Show as table' }).click();
@@ -169,7 +168,7 @@ async function amendCat(page: Page): Promise<void> {
   await drawer.waitFor({ state: 'hidden' });
   const history = page.getByRole('listitem').filter({ hasText: 'Read from the wrong line' });
   await history.getByText('by Tamsin Wrede').waitFor();
-  expect(await history.innerText()).toMatch(/was 21, now 20/);
+  expect(await history.innerText()).toMatch(/was\s+21, now 20/);
   await picture(page, 'test-amended');
   await expectAxeClean(page, 'an amended test');
   await page.getByRole('link', { name: 'Summary' }).click();
