@@ -111,7 +111,9 @@ describe('marks', () => {
       'before',
       'not stated',
     ]);
-    expect(legendEntries(catSeries.points)).toEqual([{ kind: 'filled', words: 'compared' }]);
+    expect(legendEntries(catSeries.points)).toEqual([]);
+    const other = [...walkSeries.points, aPoint('2026-11-02', 330, { compared: false, reason: 'course length 20 m' })];
+    expect(legendEntries(other).map((entry) => entry.words)).toEqual(['compared', 'not compared']);
   });
 
   it('moves touching marks apart by at most 6 px each and leaves others alone', () => {

@@ -33,6 +33,7 @@ export const legendEntries = (points: readonly TrendPoint[]): LegendEntry[] =>
     if (drawn.length === 0) return [];
     if (kind === 'dashed') return [{ kind, words: 'quality D or below, not judged' }];
     const states = [...new Set(drawn.map((point) => point.state))];
+    if (states.includes(null) && points.every((point) => point.compared)) return [];
     if (states.includes(null)) return [{ kind, words: kind === 'filled' ? 'compared' : 'not compared' }];
     const order = ['after', 'before', 'none', 'unknown'] as const;
     return [

@@ -45,7 +45,13 @@ export const SmallTrend = ({ series, onChoose }: SmallTrendProps) => {
         <span className="text-body font-bold">{name}</span>{' '}
         <span className="text-note text-ink-soft">{underName(series)}</span>
       </span>
-      <svg aria-hidden="true" viewBox="0 0 248 66" width={248} height={66} className="my-2 block max-w-full font-sans">
+      <svg
+        aria-hidden="true"
+        viewBox="0 0 248 66"
+        width={248}
+        height={66}
+        className="my-2 block max-w-full print:my-0 font-sans"
+      >
         {layout && <SmallTrendPlot layout={layout} width={size.width} />}
         {last && (
           <text x={214} y={(at?.y ?? 33) + 6} fontSize={17} fontWeight={700} fill="var(--ink)">

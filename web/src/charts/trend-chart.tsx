@@ -4,7 +4,9 @@ import type { TrendPoint, TrendSeries } from '@slighthill/shared/contracts/trend
 import { cx } from '../ui/cx';
 import { describePoint } from './describe-point';
 import { describeTrend } from './describe-trend';
+import { differenceBracket } from './important-difference';
 import { placeCard } from './place-card';
+import { differenceWordsAt } from './plot-difference';
 import { latestLabel, markBoxes } from './plot-latest';
 import { cardHeightPx, ReaderCard } from './reader-card';
 import { nearestMark, readerKey } from './reader-keys';
@@ -37,13 +39,22 @@ export const TrendChart = ({ series, view, patternAbnormal, course, onOpenPoint 
   const { frame, marks, narrow } = layout;
   const read = index === null ? null : (marks[Math.min(index, marks.length - 1)] ?? null);
   const label = latestLabel(series, view, bands, layout);
+  const baseline = marks.find((mark) => mark.point.role === 'baseline');
+  const bracket = differenceBracket(series, view);
+  const inLegend = baseline && bracket && differenceWordsAt(layout, baseline, bracket, course) === 'legend';
+  const difference = inLegend ? bracket.size : null;
   const described = read && describePoint(series, read.point);
   const place =
     read && described && !narrow
       ? placeCard({
           at: { x: read.dateX, y: read.y },
           card: { width: cardWidthPx, height: cardHeightPx(described) },
-          within: { left: frame.left, top: frame.top - 4, width: frame.right - frame.left, height: frame.height - 8 },
+          within: {
+            left: frame.left,
+            top: frame.top - 2,
+            width: frame.right - frame.left,
+            height: frame.height - frame.top,
+          },
           keepClear: [...markBoxes(marks), ...(label ? [label.box] : [])],
         })
       : null;
@@ -107,7 +118,7 @@ export const TrendChart = ({ series, view, patternAbnormal, course, onOpenPoint 
         {described && byKey ? described.spoken : ''}
       </p>
       <figcaption className="mt-2.5 flex flex-wrap items-baseline justify-between gap-x-6 gap-y-1">
-        <TrendLegend points={marks.map((mark) => mark.point)} />
+        <TrendLegend points={marks.map((mark) => mark.point)} difference={difference} />
         <span id={hintId} data-print="hide" className="text-note text-ink-soft">
           {index === null || !read
             ? `${marks.length === 1 ? '1 point' : `${marks.length} points`}. `

@@ -57,14 +57,14 @@ export interface LayoutRequest {
   width: number;
 }
 
-const axisPx = { left: 34, top: 12, bottom: 32 };
+const axisPx = { left: 34, top: 24, bottom: 32 };
 const gutterPx = { wide: 172, narrow: 84 };
 const monthNamePx = 30;
 
 const frameOf = (width: number, hasBands: boolean): Frame & { narrow: boolean } => {
   const narrow = width - axisPx.left - gutterPx.wide < 480;
   const gutter = hasBands ? (narrow ? gutterPx.narrow : gutterPx.wide) : narrow ? 8 : 24;
-  const height = narrow ? 260 : 300;
+  const height = narrow ? 268 : 312;
   return {
     width,
     height,

@@ -44,7 +44,7 @@ export const TrendPlot = ({ series, view, course, layout, label, read }: TrendPl
       <PlotAxes layout={layout} />
       {lln && <PlotLln layout={layout} line={lln} />}
       {course && <PlotCourse layout={layout} course={course} />}
-      {bracket && baseline && <PlotDifference layout={layout} baseline={baseline} bracket={bracket} />}
+      {bracket && baseline && <PlotDifference layout={layout} baseline={baseline} bracket={bracket} course={course} />}
       {stems.map((stem) => (
         <line key={`${stem.x1} ${stem.y1}`} {...stem} stroke="var(--ink)" strokeWidth={1.4} />
       ))}

@@ -1,0 +1,73 @@
+import { useState } from 'react';
+import type { TrendResponse } from '@slighthill/shared/contracts/trend';
+import { numbersSentence, rulesSentence } from './pattern-sentences';
+import { RuleDialog } from './rule-dialog';
+import type { SummaryView } from './use-summary-view';
+
+interface PatternSummaryProps {
+  trends: TrendResponse;
+  view: SummaryView;
+}
+
+const clinicRules = { referenceSet: null, group: null, gradingRule: null, ratioRule: null };
+
+/** The pattern, then its numbers, then the rules that produced them, with a way to look by other rules. */
+export const PatternSummary = ({ trends, view }: PatternSummaryProps) => {
+  const [choosing, setChoosing] = useState(false);
+  const { pattern } = trends;
+  const changed = Object.values(view.rules).some((value) => value !== null);
+  return (
+    <section
+      aria-label="Pattern"
+      className="grid gap-x-6 gap-y-2 margin:grid-cols-[264px_minmax(0,1fr)] print:grid-cols-[200px_minmax(0,1fr)]"
+    >
+      <h2 className="text-record">{pattern?.heading ?? 'No pattern yet'}</h2>
+      <div>
+        {pattern ? (
+          <p>
+            {numbersSentence(pattern, trends).map((phrase, index) =>
+              typeof phrase === 'string' ? phrase : <strong key={index}>{phrase.strong}</strong>,
+            )}
+          </p>
+        ) : (
+          <p>A pattern needs a spirometry test with FEV1 and FVC that may be predicted.</p>
+        )}
+        <p className="mt-1 text-note text-ink-soft">
+          {pattern && `${rulesSentence(pattern, trends)} `}
+          <button
+            type="button"
+            data-print="hide"
+            onClick={() => setChoosing(true)}
+            className="link -my-1 inline-flex min-h-6 items-center"
+          >
+            Change rule
+          </button>
+        </p>
+        {changed && (
+          <p className="mt-2 text-note text-gorse">
+            These are not your clinic’s rules. Only this view is changed.{' '}
+            <button
+              type="button"
+              data-print="hide"
+              onClick={() => view.changeRules(clinicRules)}
+              className="link inline-flex min-h-6 items-center"
+            >
+              Back to the clinic’s rules
+            </button>
+          </p>
+        )}
+      </div>
+      {choosing && (
+        <RuleDialog
+          rules={view.rules}
+          pattern={pattern}
+          onClose={() => setChoosing(false)}
+          onChoose={(rules) => {
+            setChoosing(false);
+            view.changeRules(rules);
+          }}
+        />
+      )}
+    </section>
+  );
+};

@@ -1,0 +1,70 @@
+import type { ReactNode } from 'react';
+import { diagnosisGroupLabels, type Patient } from '@slighthill/shared/contracts/patient';
+import { formatDate } from '../../lib/clinic-time';
+import { cx } from '../../ui/cx';
+import { FlagChips } from './flag-chips';
+import { courseWords, oxygenWords } from './record-words';
+
+interface FactProps {
+  label: string;
+  note?: string | false;
+  className?: string;
+  children: ReactNode;
+}
+
+const Fact = ({ label, note, className, children }: FactProps) => (
+  <div className={className}>
+    <dt className="text-note whitespace-nowrap text-ink-soft">{label}</dt>
+    <dd className="whitespace-nowrap">
+      {children}
+      {note && <span className="text-note text-ink-soft"> {note}</span>}
+    </dd>
+  </div>
+);
+
+interface StandingHeaderProps {
+  patient: Patient;
+  /** The Record button with its menu, where the reader may record. */
+  record: ReactNode;
+}
+
+/** Who this is, always in sight; under 1000 px it keeps name, course and flags. */
+export const StandingHeader = ({ patient, record }: StandingHeaderProps) => (
+  <header
+    data-record-header
+    className="sticky top-(--top-bar-height) z-20 border-b border-line bg-surface print:static print:border-rule"
+  >
+    <div className="page-frame flex min-h-20 flex-wrap items-center gap-x-6 gap-y-1.5 py-2 margin:flex-nowrap margin:py-1">
+      <div className="min-w-0 grow basis-40 margin:min-w-46 margin:grow-0 margin:basis-auto">
+        <h1 className="text-record">
+          {patient.givenName} {patient.familyName}
+        </h1>
+        <p className="text-note whitespace-nowrap text-ink-soft">
+          {patient.ageYears}, born {formatDate(patient.birthDate)}
+        </p>
+      </div>
+      <span aria-hidden="true" className="order-3 h-0 basis-full margin:hidden print:hidden" />
+      <dl className="order-4 flex gap-x-6 margin:order-none print:order-none">
+        <Fact
+          label="Diagnosis group"
+          note={!patient.diagnosisConfirmed && 'not confirmed'}
+          className="hidden margin:block print:block"
+        >
+          {diagnosisGroupLabels[patient.diagnosisGroup]}
+        </Fact>
+        <Fact label="Course" className="max-margin:[&>dt]:sr-only print:[&>dt]:not-sr-only">
+          {courseWords(patient.enrollment)}
+        </Fact>
+        <Fact label="Oxygen" className={cx('hidden print:block', patient.oxygen ? 'margin:block' : 'drawer:block')}>
+          {oxygenWords(patient.oxygen)}
+        </Fact>
+      </dl>
+      <div className="order-5 min-w-0 margin:order-none margin:ml-auto print:ml-auto">
+        <FlagChips patient={patient} />
+      </div>
+      <div data-print="hide" className="order-2 margin:order-none">
+        {record}
+      </div>
+    </div>
+  </header>
+);
