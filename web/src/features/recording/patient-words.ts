@@ -1,5 +1,7 @@
 import { diagnosisGroupLabels, type Patient } from '@slighthill/shared/contracts/patient';
 
 /** Whose record a drawer writes to: "Ruth Valdane, 65, COPD". */
-export const patientWords = (patient: Pick<Patient, 'givenName' | 'familyName' | 'ageYears' | 'diagnosisGroup'>): string =>
+export const patientWords = (
+  patient: Pick<Patient, 'givenName' | 'familyName' | 'ageYears' | 'diagnosisGroup'>,
+): string =>
   `${patient.givenName} ${patient.familyName}, ${patient.ageYears}, ${diagnosisGroupLabels[patient.diagnosisGroup]}`;

@@ -24,7 +24,10 @@ export const testListQuery = (patientId: string) =>
   infiniteQueryOptions({
     queryKey: ['patient', patientId, 'tests', 'list'],
     queryFn: ({ pageParam, signal }) =>
-      apiFetch<Page<TestListItem>>(`/api/patients/${patientId}/tests`, { query: { cursor: pageParam, limit: 50 }, signal }),
+      apiFetch<Page<TestListItem>>(`/api/patients/${patientId}/tests`, {
+        query: { cursor: pageParam, limit: 50 },
+        signal,
+      }),
     initialPageParam: null as string | null,
     getNextPageParam: (page) => page.nextCursor,
   });

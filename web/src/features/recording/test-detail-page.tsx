@@ -39,7 +39,9 @@ export const Component = () => {
       {query.isPending && <SkeletonRows label="Loading the test" rows={6} bars={[20, 40]} />}
       {query.error && (
         <ErrorNotice {...(absent ? {} : { onRetry: () => void query.refetch() })} retrying={query.isFetching}>
-          {absent ? 'There is no such test in this record.' : `The test could not be loaded. ${describeProblem(query.error)}`}
+          {absent
+            ? 'There is no such test in this record.'
+            : `The test could not be loaded. ${describeProblem(query.error)}`}
         </ErrorNotice>
       )}
       {detail && patient && (

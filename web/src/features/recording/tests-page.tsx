@@ -24,7 +24,10 @@ export const Component = () => {
 
   return (
     <>
-      <PageHeader title="Tests" note={query.isSuccess && tests.length > 0 && countWords(tests.length, query.hasNextPage)} />
+      <PageHeader
+        title="Tests"
+        note={query.isSuccess && tests.length > 0 && countWords(tests.length, query.hasNextPage)}
+      />
       <div className="mt-3">
         {query.isPending && <SkeletonRows label="Loading tests" rows={8} bars={[12, 22, 30, 14]} />}
         {query.error && (

@@ -39,7 +39,11 @@ export const BodySizeBody = ({ state, earlierHeight }: BodySizeBodyProps) => {
       />
       <p className="rounded-control bg-mist px-4 py-3" role="status">
         <span className="text-ink-soft">Body mass index </span>
-        <strong>{bmi === null ? 'not yet' : `${formatNumber(bmi, getMeasure('bmi').decimals)} ${getMeasure('bmi').unit.symbol}`}</strong>
+        <strong>
+          {bmi === null
+            ? 'not yet'
+            : `${formatNumber(bmi, getMeasure('bmi').decimals)} ${getMeasure('bmi').unit.symbol}`}
+        </strong>
         {bmi !== null && carried && (
           <span className="text-note text-ink-soft">
             {` with ${formatNumber(carried.value, 1)} cm from ${formatDayMonth(carried.on)}`}

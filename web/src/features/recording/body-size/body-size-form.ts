@@ -60,7 +60,10 @@ export const bodySizeQuestions = (
   [heightQuestion(form.heightCm, earlier.heightCm), weightQuestion(form.weightKg, earlier.weightKg)].filter(isDefined);
 
 /** Body mass index of what is typed, by the registry's own derivation (rule OM-4); an empty height is the last one. */
-export const typedBmi = (form: Pick<BodySizeForm, 'heightCm' | 'weightKg'>, earlierHeight: Earlier | null): number | null => {
+export const typedBmi = (
+  form: Pick<BodySizeForm, 'heightCm' | 'weightKg'>,
+  earlierHeight: Earlier | null,
+): number | null => {
   const weight = typed(form.weightKg);
   const heightCm = form.heightCm.trim() === '' ? (earlierHeight?.value ?? null) : usableHeightCm(form.heightCm);
   const compute = getMeasure('bmi').derivedFrom?.compute;

@@ -15,7 +15,9 @@ export const FileEntryDrawer = (props: RecordDrawerProps) => {
       form="file-entry"
       subject={patient.id}
       schema={fileForm}
-      empty={() => emptyFileForm(clinicDateOf(new Date(), timeZone), crypto.randomUUID(), patient.diagnosisGroup, outside)}
+      empty={() =>
+        emptyFileForm(clinicDateOf(new Date(), timeZone), crypto.randomUUID(), patient.diagnosisGroup, outside)
+      }
       onClose={props.onClose}
     >
       {(start, key) => <FileEntryFormDrawer key={key} {...props} {...start} />}

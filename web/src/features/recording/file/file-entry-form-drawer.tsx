@@ -41,7 +41,8 @@ export const FileEntryFormDrawer = (props: FileEntryFormDrawerProps) => {
       body: checkFileEntry(form, timeZone).body,
       toFormPath: fileServerPath,
     }),
-    onSaved: ({ entry }) => onSaved({ words: `${kindLabel(entry.kind)} is in File`, to: `/patients/${patient.id}/file` }),
+    onSaved: ({ entry }) =>
+      onSaved({ words: `${kindLabel(entry.kind)} is in File`, to: `/patients/${patient.id}/file` }),
   });
   return (
     <FormProvider {...state.form}>

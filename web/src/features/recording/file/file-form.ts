@@ -127,7 +127,8 @@ export const checkFileEntry = (form: FileForm, timeZone: string): CheckedFileEnt
   const details = detailsOf[form.kind](form, timeZone);
   const result = fileEntryCreate.safeParse({ id: form.id, kind: form.kind, on: form.on, note: form.note, details });
   const issues = issuesOf(result, fileFormPath, (path) => form[path as keyof FileForm] === '');
-  const noFlow = form.kind === 'oxygen-order' && [form.restLpm, form.walkingLpm, form.asleepLpm].every((flow) => flow.trim() === '');
+  const noFlow =
+    form.kind === 'oxygen-order' && [form.restLpm, form.walkingLpm, form.asleepLpm].every((flow) => flow.trim() === '');
   if (noFlow) issues.unshift(nothingGiven);
   return { issues, body: result.success && issues.length === 0 ? result.data : null };
 };

@@ -42,6 +42,8 @@ export const dateLabels: Record<FileEntryKind, string> = {
 export const kindLabel = (kind: FileEntryKind): string => fileEntryKindLabels[kind];
 
 const text = (value: unknown): string | null => (typeof value === 'string' && value !== '' ? value : null);
+const lowerFirst = (words: string | undefined): string | null =>
+  words ? words.charAt(0).toLowerCase() + words.slice(1) : null;
 const joined = (...parts: (string | null | false | undefined)[]): string => parts.filter(Boolean).join(', ');
 
 const flowWords = (name: string, value: unknown): string | null =>
@@ -67,13 +69,15 @@ const writers: Record<FileEntryKind, (details: Details) => string> = {
       flowWords('at rest', details.restLpm),
       flowWords('walking', details.walkingLpm),
       flowWords('asleep', details.asleepLpm),
-      oxygenDeviceLabels[details.device as keyof typeof oxygenDeviceLabels],
-      details.outside === true ? `outside order by ${text(details.prescriber)}` : `ordered by ${text(details.prescriber)}`,
+      lowerFirst(oxygenDeviceLabels[details.device as keyof typeof oxygenDeviceLabels]),
+      details.outside === true
+        ? `outside order by ${text(details.prescriber)}`
+        : `ordered by ${text(details.prescriber)}`,
     ),
   medicine: (details) =>
     joined(
       text(details.name),
-      medicineClassLabels[details.medicineClass as keyof typeof medicineClassLabels],
+      lowerFirst(medicineClassLabels[details.medicineClass as keyof typeof medicineClassLabels]),
       text(details.stoppedOn) && `stopped ${formatDate(String(details.stoppedOn))}`,
     ),
   'heart-rhythm': (details) => (details.atrialFibrillation === true ? 'Atrial fibrillation' : 'No atrial fibrillation'),

@@ -38,9 +38,18 @@ const DiagnosisFields = () => {
   return (
     <>
       <Field label="Diagnosis group" error={error('diagnosisGroup')}>
-        <Select {...register('diagnosisGroup')} emptyLabel="Choose one" choices={choicesOf(diagnosisGroups, diagnosisGroupLabels)} />
+        <Select
+          {...register('diagnosisGroup')}
+          emptyLabel="Choose one"
+          choices={choicesOf(diagnosisGroups, diagnosisGroupLabels)}
+        />
       </Field>
-      <Field label="Confirmed by" labelNote="optional" hint="The clinician who confirmed it" error={error('confirmedBy')}>
+      <Field
+        label="Confirmed by"
+        labelNote="optional"
+        hint="The clinician who confirmed it"
+        error={error('confirmedBy')}
+      >
         <TextInput {...register('confirmedBy')} autoComplete="off" />
       </Field>
       <Field label="In words" labelNote="optional" error={error('description')} className="row:col-span-2">
@@ -78,7 +87,11 @@ const OxygenFields = ({ mayOrder }: { mayOrder: boolean }) => {
         </Field>
       </div>
       <Field label="Device" error={error('device')}>
-        <Select {...register('device')} emptyLabel="Choose one" choices={choicesOf(oxygenDevices, oxygenDeviceLabels)} />
+        <Select
+          {...register('device')}
+          emptyLabel="Choose one"
+          choices={choicesOf(oxygenDevices, oxygenDeviceLabels)}
+        />
       </Field>
       <Field label="Prescriber" error={error('prescriber')}>
         <TextInput {...register('prescriber')} autoComplete="off" />
@@ -104,7 +117,11 @@ const MedicineFields = () => {
         <TextInput {...register('name')} autoComplete="off" />
       </Field>
       <Field label="Kind" error={error('medicineClass')}>
-        <Select {...register('medicineClass')} emptyLabel="Choose one" choices={choicesOf(medicineClasses, medicineClassLabels)} />
+        <Select
+          {...register('medicineClass')}
+          emptyLabel="Choose one"
+          choices={choicesOf(medicineClasses, medicineClassLabels)}
+        />
       </Field>
       <Field label="Last dose" labelNote="optional" error={error('lastDoseAt')}>
         <DateTimeInput {...register('lastDoseAt')} />

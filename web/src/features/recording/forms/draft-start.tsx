@@ -18,7 +18,15 @@ interface DraftStartProps<Form> {
 }
 
 /** Opens with the kept draft, if there is one, else empty. A draft that cannot be read stops nobody from typing. */
-export const DraftStart = <Form,>({ title, form, subject, schema, empty, onClose, children }: DraftStartProps<Form>) => {
+export const DraftStart = <Form,>({
+  title,
+  form,
+  subject,
+  schema,
+  empty,
+  onClose,
+  children,
+}: DraftStartProps<Form>) => {
   const draft = useQuery(draftQuery(form, subject));
   const [fresh, setFresh] = useState(() => ({ key: 0, form: empty() }));
   // What the drawer opened with stays, also when the draft on the server is renewed meanwhile.

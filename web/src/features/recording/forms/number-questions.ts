@@ -62,10 +62,17 @@ export const heightQuestion = (text: string, earlier: Earlier | null, field = 'h
   const unit = questionHeight(value);
   if (unit) {
     const cm = unit.suggestionCm.toFixed(1);
-    return { key: `${field}:unit:${value}`, field, text: unit.question, fix: { label: `Yes, ${cm} cm`, value: cm }, mayStand: false };
+    return {
+      key: `${field}:unit:${value}`,
+      field,
+      text: unit.question,
+      fix: { label: `Yes, ${cm} cm`, value: cm },
+      mayStand: false,
+    };
   }
   // Compared as they are shown, so that 166.5 against 165.0 is not more than 1.5 by a trick of binary arithmetic.
-  if (!earlier || !inLimits(value) || Math.round(Math.abs(value - earlier.value) * 10) <= heightChangeCm * 10) return null;
+  if (!earlier || !inLimits(value) || Math.round(Math.abs(value - earlier.value) * 10) <= heightChangeCm * 10)
+    return null;
   return {
     key: `${field}:change:${value}`,
     field,
@@ -76,5 +83,4 @@ export const heightQuestion = (text: string, earlier: Earlier | null, field = 'h
 
 /** Weight: outside the usual range, or more than a tenth from the last (rule 0.7). */
 export const weightQuestion = (text: string, earlier: Earlier | null, field = 'weightKg'): FormQuestion | null =>
-  plausibleQuestion('weight', text, field, 'Weight') ??
-  changeQuestion('weight', typed(text), earlier, field, 'Weight');
+  plausibleQuestion('weight', text, field, 'Weight') ?? changeQuestion('weight', typed(text), earlier, field, 'Weight');

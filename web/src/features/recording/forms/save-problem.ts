@@ -9,7 +9,11 @@ export interface SaveProblem {
 const isType = (error: ApiProblem, code: string): boolean => error.type.endsWith(`/${code}`);
 
 /** What a failed save means for the person who typed: always that nothing typed was lost, and what to do. */
-export const saveProblem = (error: unknown, toFormPath: (path: string) => string | null, kept = 'numbers'): SaveProblem => {
+export const saveProblem = (
+  error: unknown,
+  toFormPath: (path: string) => string | null,
+  kept = 'numbers',
+): SaveProblem => {
   const lead = `Not saved. Your ${kept} are here.`;
   if (!(error instanceof ApiProblem)) return { words: `${lead} ${describeProblem(error)}`, issues: [] };
   if (error.isSignedOut) return { words: `${lead} Continue with your password, then save again.`, issues: [] };

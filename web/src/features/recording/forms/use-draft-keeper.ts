@@ -63,17 +63,20 @@ export const useDraftKeeper = ({ form, subject, values, enabled, restoredAt }: D
     return () => window.clearTimeout(timer);
   }, [enabled, text, keptText]);
 
-  const discard = useCallback(async (another = false) => {
-    ended.current = true;
-    setState({ kind: 'none' });
-    await queue.current;
-    try {
-      await apiFetch(path, { method: 'DELETE' });
-    } catch {
-      // The draft goes by itself after seven days; what is saved carries its own id and is not stored twice.
-    }
-    if (another) ended.current = false;
-  }, [path]);
+  const discard = useCallback(
+    async (another = false) => {
+      ended.current = true;
+      setState({ kind: 'none' });
+      await queue.current;
+      try {
+        await apiFetch(path, { method: 'DELETE' });
+      } catch {
+        // The draft goes by itself after seven days; what is saved carries its own id and is not stored twice.
+      }
+      if (another) ended.current = false;
+    },
+    [path],
+  );
 
   return { state, current: state.kind === 'kept' && text === keptText, keepNow: () => keep(text), discard };
 };

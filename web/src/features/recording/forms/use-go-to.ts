@@ -1,7 +1,10 @@
 import { useCallback, useEffect, useState } from 'react';
 
 /** Puts the focus on a field, also one that a change of tab has yet to draw. */
-export const useGoTo = (setFocus: (field: string) => void, reveal?: (field: string) => void): ((field: string) => void) => {
+export const useGoTo = (
+  setFocus: (field: string) => void,
+  reveal?: (field: string) => void,
+): ((field: string) => void) => {
   const [wanted, setWanted] = useState<{ field: string } | null>(null);
   useEffect(() => {
     if (wanted) setFocus(wanted.field);

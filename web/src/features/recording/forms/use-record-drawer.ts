@@ -47,7 +47,18 @@ export interface RecordDrawerState {
 export const useRecordDrawer = <Form extends AskingForm, Answer>(
   source: RecordDrawerSource<Form, Answer>,
 ): RecordDrawerState => {
-  const { patientId, state, check, draftForm, restoredAt, request, onSaved, another, onStale, kept = 'numbers' } = source;
+  const {
+    patientId,
+    state,
+    check,
+    draftForm,
+    restoredAt,
+    request,
+    onSaved,
+    another,
+    onStale,
+    kept = 'numbers',
+  } = source;
   const { form, values, goTo } = state;
   const [problem, setProblem] = useState<string | null>(null);
   const typedSomething = form.formState.isDirty;

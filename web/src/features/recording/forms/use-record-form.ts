@@ -1,5 +1,12 @@
-import { useEffect, useMemo } from 'react';
-import { useForm, useWatch, type DefaultValues, type FieldPath, type FieldValues, type UseFormReturn } from 'react-hook-form';
+import { useEffect, useEffectEvent, useMemo, useRef } from 'react';
+import {
+  useForm,
+  useWatch,
+  type DefaultValues,
+  type FieldPath,
+  type FieldValues,
+  type UseFormReturn,
+} from 'react-hook-form';
 import { useDebounced } from '../../../lib/use-debounced';
 import { resolverFor, type FormIssue } from './form-issues';
 import { openQuestions, type FormQuestion } from './form-question';
@@ -53,11 +60,16 @@ export const useRecordForm = <Form extends AskingForm>({
   const questions = useSettledQuestions(ask(values), values.answered);
 
   const settled = useDebounced(values, 300);
-  const submitted = formState.isSubmitted;
+  const { submitCount } = formState;
+  const sent = useRef('');
+  const remember = useEffectEvent(() => {
+    sent.current = JSON.stringify(values);
+  });
+  useEffect(() => remember(), [submitCount]);
   useEffect(() => {
-    // After a refused save the marks follow what is typed.
-    if (submitted) void trigger();
-  }, [settled, submitted, trigger]);
+    // After a refused save the marks follow what is typed; what the server marked stays until something changes.
+    if (submitCount > 0 && JSON.stringify(settled) !== sent.current) void trigger();
+  }, [settled, submitCount, trigger]);
 
   const put = (path: string, value: unknown): void =>
     setValue(path as FieldPath<Form>, value as never, { shouldDirty: true, shouldTouch: true });

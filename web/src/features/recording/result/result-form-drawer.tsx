@@ -6,7 +6,7 @@ import { FormProvider } from 'react-hook-form';
 import { formatResult } from '../../../charts/format-measure';
 import { useClinicZone } from '../../../lib/session';
 import { Button } from '../../../ui/button';
-import { SavedNote } from '../../../ui/saved-note';
+import { Icon } from '../../../ui/icon';
 import { lastHeight, lastResult, lastWeight } from '../forms/earlier-results';
 import { RecordFrame } from '../forms/record-frame';
 import { useRecordDrawer } from '../forms/use-record-drawer';
@@ -24,8 +24,7 @@ interface ResultFormDrawerProps extends RecordDrawerProps {
   onStartOver: () => void;
 }
 
-const known = (path: string): boolean =>
-  path.startsWith('conditions.') || resultFields.some((field) => path === field);
+const known = (path: string): boolean => path.startsWith('conditions.') || resultFields.some((field) => path === field);
 
 const resultWords = ({ measure, value }: Measurement): string => {
   const { shortLabel, unit } = getMeasure(measure);
@@ -82,7 +81,14 @@ export const ResultFormDrawer = (props: ResultFormDrawerProps) => {
         onClose={onClose}
         extra={<Button onClick={drawer.submitAndGoOn}>Save and add another</Button>}
       >
-        <SavedNote>{sitting.length > 0 && `In the record: ${sitting.join(', ')}`}</SavedNote>
+        <p role="status" className="flex items-center gap-2 text-note text-fern empty:-mb-4">
+          {sitting.length > 0 && (
+            <>
+              <Icon name="check" size={18} />
+              {`In the record: ${sitting.join(', ')}`}
+            </>
+          )}
+        </p>
         <ResultFields state={state} earlierHeight={body.heightCm} amending={false} />
       </RecordFrame>
     </FormProvider>

@@ -49,12 +49,15 @@ const write = (value: number | boolean | string | null): string => {
 
 /** The registry's usual circumstances of a measure, as the form shows them. */
 export const usualConditions = (id: MeasureId): Record<string, string> =>
-  Object.fromEntries(Object.entries(getMeasure(id).conditions).map(([key, condition]) => [key, write(condition.default)]));
-
-export const writtenConditions = (id: MeasureId, stored: Record<string, number | boolean | string>): Record<string, string> =>
   Object.fromEntries(
-    Object.keys(getMeasure(id).conditions).map((key) => [key, write(stored[key] ?? null)]),
+    Object.entries(getMeasure(id).conditions).map(([key, condition]) => [key, write(condition.default)]),
   );
+
+export const writtenConditions = (
+  id: MeasureId,
+  stored: Record<string, number | boolean | string>,
+): Record<string, string> =>
+  Object.fromEntries(Object.keys(getMeasure(id).conditions).map((key) => [key, write(stored[key] ?? null)]));
 
 /** One more result in the same sitting keeps when it was taken and the body size. */
 export const nextResultForm = (saved: ResultForm, id: string): ResultForm => ({

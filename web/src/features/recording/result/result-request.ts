@@ -22,14 +22,22 @@ const readConditions = (form: ResultForm) => {
   const conditions: Record<string, number | boolean | string> = {};
   for (const [key, condition] of declared) {
     const value = readCondition(condition, form.conditions[key] ?? '');
-    if (Number.isNaN(value))
-      issues.push({ path: `conditions.${key}`, message: `${condition.label} must be a number` });
+    if (Number.isNaN(value)) issues.push({ path: `conditions.${key}`, message: `${condition.label} must be a number` });
     else if (value !== null) conditions[key] = value;
   }
   return { conditions, issues };
 };
 
-export const resultFields = ['takenAt', 'value', 'heightCm', 'heightMethod', 'weightKg', 'item9', 'note', 'measure'] as const;
+export const resultFields = [
+  'takenAt',
+  'value',
+  'heightCm',
+  'heightMethod',
+  'weightKg',
+  'item9',
+  'note',
+  'measure',
+] as const;
 
 /** A message's place in the form; the conditions keep their key. */
 export const resultFormPath = (path: readonly PropertyKey[]): string => path.map(String).join('.') || 'measure';

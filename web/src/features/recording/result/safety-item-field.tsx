@@ -37,8 +37,8 @@ export const SafetyItemField = ({ item }: SafetyItemFieldProps) => {
               <p className="flex items-start gap-2 rounded-control bg-rowan-wash px-4 py-3 text-rowan-ink">
                 <Icon name="alert" />
                 <span>
-                  <strong>Saving raises a safety flag.</strong> It stays in the record’s header until a pulmonologist or a
-                  therapist resolves it. Follow your clinic’s safety protocol now.
+                  <strong>Saving raises a safety flag.</strong> It stays in the record’s header until a pulmonologist or
+                  a therapist resolves it. Follow your clinic’s safety protocol now.
                 </span>
               </p>
             )}

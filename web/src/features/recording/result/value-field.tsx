@@ -26,7 +26,10 @@ export const ValueField = ({ measure, asked }: ValueFieldProps) => {
             arrange="list"
             hint={measure.hint}
             error={error}
-            choices={measure.gradeDescriptions!.map((words, grade) => ({ value: String(grade), label: `${grade}  ${words}` }))}
+            choices={measure.gradeDescriptions!.map((words, grade) => ({
+              value: String(grade),
+              label: `${grade}  ${words}`,
+            }))}
             value={field.value === '' ? null : field.value}
             onValueChange={field.onChange}
           />

@@ -24,6 +24,6 @@ export const responseWords = (sets: readonly DerivedSet[]): string | null => {
   });
   if (found.length === 0) return null;
   const changes = found.map(({ name, percent }) => `${name} ${formatNumber(percent, 1)}%`).join(', ');
-  const verdict = found.some(({ isResponse }) => isResponse) ? 'This is a response' : 'This is not a response';
-  return `Bronchodilator change in percent of predicted: ${changes}. ${verdict}: over 10% in either is one (ERS/ATS 2021).`;
+  const reached = found.some(({ isResponse }) => isResponse) ? 'reached' : 'not reached';
+  return `Bronchodilator change in percent of predicted: ${changes}. A response is more than 10% in either (ERS/ATS 2021): ${reached}.`;
 };

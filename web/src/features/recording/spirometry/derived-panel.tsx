@@ -19,12 +19,14 @@ const Verdict = ({ sets, severityRule }: Pick<DerivedPanelProps, 'sets' | 'sever
   const pattern = prediction?.pattern;
   if (!pattern) return null;
   const { severity } = pattern;
+  // A heading that speaks of the two ratio rules is shown whole; else its band follows by itself.
+  const rulesDiffer = pattern.lowByFixedRatio !== pattern.lowByLln;
   const fev1 = prediction.measures.fev1;
   const value = severity?.rule === 'ers-ats-2021' ? fev1?.z : fev1?.percentPredicted;
   const limits = severity && value != null ? bandLimitWords(severity.rule, value) : null;
   return (
     <>
-      <span className="font-semibold">{pattern.heading}</span>
+      <span className="font-semibold">{severity && !rulesDiffer ? pattern.label : pattern.heading}</span>
       {severity && (
         <>
           <span className="rounded-tag bg-band-obstructive-2 px-2 font-semibold">
@@ -39,8 +41,8 @@ const Verdict = ({ sets, severityRule }: Pick<DerivedPanelProps, 'sets' | 'sever
   );
 };
 
-const head = 'pb-1 pl-3 text-right text-head text-ink-soft';
-const cell = 'pl-3 text-right whitespace-nowrap';
+const head = 'pb-1 pl-2 text-right text-head text-ink-soft row:pl-3 row:whitespace-nowrap';
+const cell = 'pl-2 text-right row:pl-3 whitespace-nowrap';
 
 /** Derived, not typed: follows what is typed, a moment later. */
 export const DerivedPanel = ({ sets, severityRule, updating, children }: DerivedPanelProps) => (
@@ -50,58 +52,56 @@ export const DerivedPanel = ({ sets, severityRule, updating, children }: Derived
       <Verdict sets={sets} severityRule={severityRule} />
       {updating && <span className="ml-auto text-note text-ink-soft">Working it out</span>}
     </p>
-    <div className="mt-2 overflow-x-auto">
-      <table className="w-full border-collapse">
-        <VisuallyHidden as="caption">Best values with percent predicted and z-score</VisuallyHidden>
-        <thead>
-          <tr className="border-b border-rule">
-            <th scope="col" className="pb-1 text-left text-head text-ink-soft">
-              <VisuallyHidden>Measure</VisuallyHidden>
+    <table className="mt-2 w-full border-collapse">
+      <VisuallyHidden as="caption">Best values with percent predicted and z-score</VisuallyHidden>
+      <thead>
+        <tr className="border-b border-rule">
+          <th scope="col" className="pb-1 text-left text-head text-ink-soft">
+            <VisuallyHidden>Measure</VisuallyHidden>
+          </th>
+          {sets.map((set) => (
+            <th key={set.title} scope="col" className={head}>
+              {set.title}
             </th>
-            {sets.map((set) => (
-              <th key={set.title} scope="col" className={head}>
-                {set.title}
-              </th>
-            ))}
-            {sets.length > 1 && (
-              <th scope="col" className={head}>
-                Change
-              </th>
-            )}
-            <th scope="col" className={head}>
-              % pred.
-            </th>
-            <th scope="col" className={head}>
-              z-score
-            </th>
-            <th scope="col" className="w-42 pb-1 pl-5 text-head max-row:hidden">
-              <VisuallyHidden>Place of the z-score</VisuallyHidden>
-              <ZStripScale />
-            </th>
-          </tr>
-        </thead>
-        <tbody>
-          {derivedRows(sets, fev1PercentEdges(severityRule)).map((row) => (
-            <tr key={row.id} className="h-9 border-b border-rule">
-              <th scope="row" className="text-left font-normal whitespace-nowrap">
-                {row.label}
-              </th>
-              {row.values.map((value, index) => (
-                <td key={index} className={index === sets.length - 1 ? `${cell} font-bold` : `${cell} text-ink-soft`}>
-                  {value}
-                </td>
-              ))}
-              {sets.length > 1 && <td className={`${cell} text-note`}>{row.change}</td>}
-              <td className={`${cell} font-bold`}>{row.percent}</td>
-              <td className={cell}>{row.z}</td>
-              <td className="pl-5 max-row:hidden">
-                {row.points.length > 0 && <ZStrip measure={row.label} points={row.points} />}
-              </td>
-            </tr>
           ))}
-        </tbody>
-      </table>
-    </div>
+          {sets.length > 1 && (
+            <th scope="col" className={head}>
+              Change
+            </th>
+          )}
+          <th scope="col" className={head}>
+            % pred.
+          </th>
+          <th scope="col" className={head}>
+            z-score
+          </th>
+          <th scope="col" className="w-42 pb-1 pl-5 text-head max-row:hidden">
+            <VisuallyHidden>Place of the z-score</VisuallyHidden>
+            <ZStripScale />
+          </th>
+        </tr>
+      </thead>
+      <tbody>
+        {derivedRows(sets, fev1PercentEdges(severityRule)).map((row) => (
+          <tr key={row.id} className="h-9 border-b border-rule">
+            <th scope="row" className="text-left font-normal whitespace-nowrap">
+              {row.label}
+            </th>
+            {row.values.map((value, index) => (
+              <td key={index} className={index === sets.length - 1 ? `${cell} font-bold` : `${cell} text-ink-soft`}>
+                {value}
+              </td>
+            ))}
+            {sets.length > 1 && <td className={`${cell} text-note`}>{row.change}</td>}
+            <td className={`${cell} font-bold`}>{row.percent}</td>
+            <td className={cell}>{row.z}</td>
+            <td className="pl-5 max-row:hidden">
+              {row.points.length > 0 && <ZStrip measure={row.label} points={row.points} />}
+            </td>
+          </tr>
+        ))}
+      </tbody>
+    </table>
     <div className="mt-2 text-note text-ink-soft">{children}</div>
   </section>
 );

@@ -49,7 +49,9 @@ export const derivedRows = (sets: readonly DerivedSet[], fev1Edges: readonly Ban
       values: sets.map(({ best }) => (best[id] === null ? '' : formatNumber(best[id], 2))),
       change: from !== null && to !== null ? formatChange(to - from, 2) : '',
       percent:
-        id !== 'fev1fvc' && measure?.percentPredicted != null ? formatPercentPredicted(measure.percentPredicted, edges) : '',
+        id !== 'fev1fvc' && measure?.percentPredicted != null
+          ? formatPercentPredicted(measure.percentPredicted, edges)
+          : '',
       z: measure?.z == null ? '' : formatZ(measure.z),
       points: sets.flatMap((set): StripPoint[] => {
         const z = measureOf(set, id)?.z;

@@ -2,11 +2,17 @@ import type { SpirometryTest } from '@slighthill/shared/contracts/spirometry-tes
 import { toLocalInput } from '../../../lib/clinic-time';
 import { emptyRow, emptySet, rowCount, type BestRow, type SpirometryForm, type TestSet } from './spirometry-form';
 
+/** A volume as it is usually typed; a third decimal stays where there is one. */
+const volume = (liters: number | null): string => {
+  if (liters === null) return '';
+  return Math.round(liters * 1000) % 10 === 0 ? liters.toFixed(2) : String(liters);
+};
+
 const write = (value: number | null): string => (value === null ? '' : String(value));
 
 const bestOf = ({ fev1, fvc, pef, fef2575 }: SpirometryTest['best']): BestRow => ({
-  fev1: write(fev1),
-  fvc: write(fvc),
+  fev1: volume(fev1),
+  fvc: volume(fvc),
   pef: write(pef),
   fef2575: write(fef2575),
 });
@@ -17,8 +23,8 @@ const setOf = (test: SpirometryTest): TestSet => ({
     const maneuver = test.maneuvers[index];
     if (!maneuver) return emptyRow();
     return {
-      fev1: write(maneuver.fev1),
-      fvc: write(maneuver.fvc),
+      fev1: volume(maneuver.fev1),
+      fvc: volume(maneuver.fvc),
       pef: write(maneuver.pef),
       fef2575: write(maneuver.fef2575),
       time: write(maneuver.forcedTimeS),

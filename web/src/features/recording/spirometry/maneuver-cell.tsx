@@ -63,10 +63,10 @@ export const ManeuverCell = ({
       placeholder={placeholder}
       onKeyDown={move}
       className={cx(
-        'h-7 w-full min-w-0 rounded-cell border bg-transparent px-2',
+        'h-7 w-full min-w-0 rounded-cell border px-2',
         left ? 'text-note' : 'text-right',
         edge(error !== undefined, asked),
-        best && 'bg-tarn-wash font-bold',
+        best ? 'bg-tarn-wash font-bold' : 'bg-transparent',
         notUsed && 'text-ink-soft line-through',
       )}
     />

@@ -85,7 +85,12 @@ export const ManeuverGrid = ({ set, title, values, questions }: ManeuverGridProp
         </table>
       </div>
       {rowErrors.map(({ index, message }) => (
-        <p key={index} id={rowErrorId(set, index)} role="alert" className="flex items-center gap-2 text-note text-rowan">
+        <p
+          key={index}
+          id={rowErrorId(set, index)}
+          role="alert"
+          className="flex items-center gap-2 text-note text-rowan"
+        >
           <Icon name="alert" size={16} />
           {`Maneuver ${index + 1}: ${message}`}
         </p>

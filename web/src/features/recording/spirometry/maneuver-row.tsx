@@ -43,7 +43,10 @@ export const ManeuverRow = ({ set, index, row, withFef, bestFev1, bestFvc, asked
     if (filled.length > 0) void trigger(filled.map((field): FieldPath<SpirometryForm> => path(field)));
   };
 
-  const cell = (field: RowField, more: { best?: boolean; notUsed?: boolean; left?: boolean; placeholder?: string } = {}) => (
+  const cell = (
+    field: RowField,
+    more: { best?: boolean; notUsed?: boolean; left?: boolean; placeholder?: string } = {},
+  ) => (
     <ManeuverCell
       path={path(field)}
       name={`${maneuver}, ${names[field]}`}
@@ -71,7 +74,9 @@ export const ManeuverRow = ({ set, index, row, withFef, bestFev1, bestFvc, asked
       <td>{cell('time')}</td>
       <td>{!empty && <UsedToggle path={path('fev1Used')} name={`${maneuver}, FEV1 used`} />}</td>
       <td>{!empty && <UsedToggle path={path('fvcUsed')} name={`${maneuver}, FVC used`} />}</td>
-      <td>{cell('reason', row.fev1Used && row.fvcUsed ? { left: true } : { left: true, placeholder: 'Why not used' })}</td>
+      <td>
+        {cell('reason', row.fev1Used && row.fvcUsed ? { left: true } : { left: true, placeholder: 'Why not used' })}
+      </td>
     </tr>
   );
 };

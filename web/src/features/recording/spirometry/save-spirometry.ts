@@ -14,7 +14,8 @@ export const serverPath = (path: string, { tests }: CheckedSpirometry): string |
   const paired = parts[0] === 'tests';
   const test = tests[paired ? Number(parts[1]) : 0];
   const rest = paired ? parts.slice(2) : parts;
-  const known = /^(performedAt|heightCm|heightMethod|weightKg|bronchodilator|drug|doseMcg|minutesSinceDose|ownBronchodilatorHoursAgo|best|maneuvers|note)$/;
+  const known =
+    /^(performedAt|heightCm|heightMethod|weightKg|bronchodilator|drug|doseMcg|minutesSinceDose|ownBronchodilatorHoursAgo|best|maneuvers|note)$/;
   return test && known.test(rest[0] ?? '') ? spirometryFormPath(rest, test) : null;
 };
 

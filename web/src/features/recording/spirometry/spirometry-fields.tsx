@@ -40,7 +40,7 @@ export const SpirometryFields = ({ values, questions, amending }: SpirometryFiel
   });
 
   return (
-    <div className="grid grid-cols-2 gap-x-4 gap-y-3 row:grid-cols-[1.35fr_1fr_1.2fr_1fr]">
+    <div className="grid grid-cols-2 gap-x-4 gap-y-3 row:grid-cols-[1.6fr_1fr_1.1fr_1fr]">
       <Field label="Date and time" error={errors.performedAt?.message} className="max-row:col-span-2">
         <DateTimeInput {...register('performedAt', check('performedAt'))} />
       </Field>
@@ -48,7 +48,7 @@ export const SpirometryFields = ({ values, questions, amending }: SpirometryFiel
         label="Height"
         error={asked('heightCm') ? undefined : errors.heightCm?.message}
         question={asked('heightCm')}
-        hint="Without shoes, to 0.1 cm"
+        hint="To 0.1 cm"
       >
         <TextInput {...register('heightCm', check('heightCm'))} unit="cm" inputMode="decimal" autoComplete="off" />
       </Field>
@@ -66,7 +66,11 @@ export const SpirometryFields = ({ values, questions, amending }: SpirometryFiel
             const state = event.target.value as FormState;
             // A corrected state of one test takes its numbers along; the typed text of every cell stays as it was.
             if (amending)
-              reset(withState(getValues(), state), { keepDefaultValues: true, keepIsSubmitted: true, keepTouched: true });
+              reset(withState(getValues(), state), {
+                keepDefaultValues: true,
+                keepIsSubmitted: true,
+                keepTouched: true,
+              });
             else setValue('state', state, { shouldDirty: true });
           }}
         />
@@ -77,7 +81,12 @@ export const SpirometryFields = ({ values, questions, amending }: SpirometryFiel
             <TextInput {...register('drug')} list="bronchodilator-drugs" autoComplete="off" />
           </Field>
           <Field label="Dose" error={errors.doseMcg?.message}>
-            <TextInput {...register('doseMcg', check('doseMcg'))} unit={'\u00b5g'} inputMode="decimal" autoComplete="off" />
+            <TextInput
+              {...register('doseMcg', check('doseMcg'))}
+              unit={'\u00b5g'}
+              inputMode="decimal"
+              autoComplete="off"
+            />
           </Field>
           <Field label="Since the dose" error={errors.minutesSinceDose?.message}>
             <TextInput

@@ -7,9 +7,18 @@ import { checkSpirometry } from './spirometry-request';
 import { setsOf, withState } from './test-sets';
 
 const zone = 'America/Denver';
-const ids = ['11111111-1111-4111-8111-111111111111', '22222222-2222-4222-8222-222222222222', '33333333-3333-4333-8333-333333333333'];
+const ids = [
+  '11111111-1111-4111-8111-111111111111',
+  '22222222-2222-4222-8222-222222222222',
+  '33333333-3333-4333-8333-333333333333',
+];
 
-const blow = (fev1: string, fvc: string, more: Partial<BlowRow> = {}): BlowRow => ({ ...emptyRow(), fev1, fvc, ...more });
+const blow = (fev1: string, fvc: string, more: Partial<BlowRow> = {}): BlowRow => ({
+  ...emptyRow(),
+  fev1,
+  fvc,
+  ...more,
+});
 
 const setOf = (...rows: BlowRow[]) => {
   const set = emptySet();
@@ -83,7 +92,13 @@ describe('bronchodilatorResponse', () => {
 describe('checkSpirometry', () => {
   it('makes a pair of one visit when both sets are filled', () => {
     const { issues, tests } = checkSpirometry(
-      form({ drug: 'Albuterol', doseMcg: '400', minutesSinceDose: '15', before: setOf(blow('1.38', '2.36')), after: setOf(blow('1.46', '2.47')) }),
+      form({
+        drug: 'Albuterol',
+        doseMcg: '400',
+        minutesSinceDose: '15',
+        before: setOf(blow('1.38', '2.36')),
+        after: setOf(blow('1.46', '2.47')),
+      }),
       zone,
     );
     expect(issues).toEqual([]);
@@ -102,7 +117,10 @@ describe('checkSpirometry', () => {
   });
 
   it('refuses an FEV1 above its FVC in words, at the row it was typed in', () => {
-    const { issues } = checkSpirometry(form({ before: setOf(blow('1.4', '2.4'), emptyRow(), blow('3.24', '3.10')) }), zone);
+    const { issues } = checkSpirometry(
+      form({ before: setOf(blow('1.4', '2.4'), emptyRow(), blow('3.24', '3.10')) }),
+      zone,
+    );
     expect(issues).toEqual([{ path: 'before.rows.2.fev1', message: 'FEV1 cannot be more than FVC (3.10 L)' }]);
   });
 
@@ -170,7 +188,9 @@ describe('spirometryQuestions', () => {
   });
 
   it('asks about a value outside the usual range (rule 0.7)', () => {
-    expect(texts({ after: setOf(blow('0.25', '1.5')) }).map((question) => question.field)).toEqual(['after.rows.0.fev1']);
+    expect(texts({ after: setOf(blow('0.25', '1.5')) }).map((question) => question.field)).toEqual([
+      'after.rows.0.fev1',
+    ]);
   });
 });
 

@@ -44,7 +44,12 @@ const rowQuestions = (row: BestRow, path: string, where: string): (FormQuestion 
   ...asked.map(({ id, name }) => plausibleQuestion(id, row[id], `${path}.${id}`, `${where}, ${name}`)),
 ];
 
-const setQuestions = (name: SetName, set: TestSet, earlier: SpirometryEarlier, words: string): (FormQuestion | null)[] => {
+const setQuestions = (
+  name: SetName,
+  set: TestSet,
+  earlier: SpirometryEarlier,
+  words: string,
+): (FormQuestion | null)[] => {
   const best = bestPreview(set);
   const rows =
     set.entry === 'best'

@@ -36,7 +36,9 @@ const markOf = (state: Exclude<FormState, 'given'>): MarkKind => {
 /** The height a preview uses: the typed one unless it is asked about, else the last measured. */
 export const heightInUse = (text: string, asked: boolean, earlier: Earlier | null) => {
   const typedCm = asked ? null : usableHeightCm(text);
-  return typedCm === null ? { heightCm: earlier?.value ?? null, carried: earlier } : { heightCm: typedCm, carried: null };
+  return typedCm === null
+    ? { heightCm: earlier?.value ?? null, carried: earlier }
+    : { heightCm: typedCm, carried: null };
 };
 
 /** The live result of what is typed, as the server works it out. */

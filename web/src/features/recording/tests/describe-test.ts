@@ -1,14 +1,20 @@
 import type { TestListItem } from '@slighthill/shared/contracts/measurement';
 import { formatNumber } from '@slighthill/shared/format';
 import { getMeasure, isMeasureId } from '@slighthill/shared/measures';
-import { formatResult } from '../../../charts/format-measure';
+import { formatResult, formatValue } from '../../../charts/format-measure';
 import { stateWords } from '../../../charts/rule-words';
 import type { TestDetail } from './test-detail';
 
 type Listed = Pick<TestListItem, 'kind' | 'measure' | 'state' | 'values' | 'heightCm'>;
 
-const words = (id: string, value: number): string =>
-  isMeasureId(id) ? formatResult(id, value, getMeasure(id).unit.symbol) : String(value);
+/** "1.43 L"; a score with its highest possible value, "18 of 40"; a grade as "grade 2". */
+const words = (id: string, value: number): string => {
+  if (!isMeasureId(id)) return String(value);
+  const { unit, absolute } = getMeasure(id);
+  if (unit.symbol === 'grade') return `grade ${formatValue(id, value)}`;
+  const isScore = unit.ucum === '{score}' && absolute !== null;
+  return isScore ? `${formatValue(id, value)} of ${absolute.max}` : formatResult(id, value, unit.symbol);
+};
 
 const isState = (state: string | null): state is keyof typeof stateWords => state !== null && state in stateWords;
 
@@ -37,5 +43,7 @@ export const testResultWords = ({ kind, measure, state, values, heightCm }: List
 /** How a sentence speaks of a test: "this spirometry test". */
 export const thisTest = (detail: TestDetail): string => {
   if (detail.kind === 'spirometry-test') return 'this spirometry test';
-  return detail.kind === 'body-size' ? 'this body size' : `this ${getMeasure(detail.measurement.measure).shortLabel} result`;
+  return detail.kind === 'body-size'
+    ? 'this body size'
+    : `this ${getMeasure(detail.measurement.measure).shortLabel} result`;
 };

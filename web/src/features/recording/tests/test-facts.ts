@@ -14,10 +14,18 @@ const unitOf = (id: MeasureId): string => getMeasure(id).unit.symbol;
 const result = (id: MeasureId, value: Maybe<number>): string | null =>
   value == null ? null : formatResult(id, value, unitOf(id));
 
-const heightWords = (cm: Maybe<number>, method: Maybe<SpirometryTest['heightMethod']>, carried = false): string | null =>
+const heightWords = (
+  cm: Maybe<number>,
+  method: Maybe<SpirometryTest['heightMethod']>,
+  carried = false,
+): string | null =>
   cm == null
     ? null
-    : [`${formatNumber(cm, 1)} cm`, method && heightMethodLabels[method].toLowerCase(), carried && 'carried from an earlier day']
+    : [
+        `${formatNumber(cm, 1)} cm`,
+        method && heightMethodLabels[method].toLowerCase(),
+        carried && 'carried from an earlier day',
+      ]
         .filter(Boolean)
         .join(', ');
 
@@ -61,7 +69,10 @@ export const spirometryFacts = (test: Partial<SpirometryTest>, timeZone: string)
 export const spirometryHistoryFacts = (test: Partial<SpirometryTest>, timeZone: string): Fact[] => [
   ...spirometryFacts(test, timeZone),
   ...factsFrom([['Entered as', test.entry === 'best' ? 'Best values' : 'Maneuvers']]),
-  ...(test.maneuvers ?? []).map((maneuver, index) => ({ label: `Maneuver ${index + 1}`, value: maneuverWords(maneuver) })),
+  ...(test.maneuvers ?? []).map((maneuver, index) => ({
+    label: `Maneuver ${index + 1}`,
+    value: maneuverWords(maneuver),
+  })),
 ];
 
 const conditionFacts = (measure: MeasureId, conditions: Measurement['conditions']): Fact[] =>
@@ -70,7 +81,11 @@ const conditionFacts = (measure: MeasureId, conditions: Measurement['conditions'
     if (value === undefined) return [];
     const place = condition.choices?.indexOf(String(value)) ?? -1;
     const words =
-      typeof value === 'boolean' ? (value ? 'Yes' : 'No') : (condition.choiceLabels?.[place] ?? `${value} ${condition.unit ?? ''}`.trim());
+      typeof value === 'boolean'
+        ? value
+          ? 'Yes'
+          : 'No'
+        : (condition.choiceLabels?.[place] ?? `${value} ${condition.unit ?? ''}`.trim());
     return [{ label: condition.label, value: words }];
   });
 

@@ -13,17 +13,15 @@ interface TestTableProps {
 export const TestTable = ({ patientId, tests }: TestTableProps) => (
   <Table caption="Tests">
     <TableHead>
-      <HeaderCell className="top-[calc(var(--top-bar-height)+80px)]">Date</HeaderCell>
-      <HeaderCell className="top-[calc(var(--top-bar-height)+80px)]">Test</HeaderCell>
-      <HeaderCell className="top-[calc(var(--top-bar-height)+80px)]">Result</HeaderCell>
-      <HeaderCell className="top-[calc(var(--top-bar-height)+80px)]">Entered by</HeaderCell>
+      <HeaderCell>Date</HeaderCell>
+      <HeaderCell>Test</HeaderCell>
+      <HeaderCell>Result</HeaderCell>
+      <HeaderCell>Entered by</HeaderCell>
     </TableHead>
     <TableBody>
       {tests.map((test) => (
         <Row key={`${test.kind} ${test.id}`} className="relative hover:bg-mist">
-          <Cell label="Date" className="whitespace-nowrap text-ink-soft">
-            {formatDate(test.on)}
-          </Cell>
+          <Cell className="whitespace-nowrap text-ink-soft">{formatDate(test.on)}</Cell>
           <Cell asHeader>
             <Link
               to={`/patients/${patientId}/tests/${test.kind}/${test.id}`}
