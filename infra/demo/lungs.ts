@@ -34,7 +34,7 @@ function percentsOf(random: Random, pattern: LungPattern): { fvc: number; fev1: 
   switch (pattern) {
     case 'obstructive': {
       const fev1 = random.between(27, 76);
-      return { fev1, fvc: Math.min(106, fev1 + random.between(20, 34)), tlc: random.between(98, 128) };
+      return { fev1, fvc: Math.min(106, fev1 + random.between(20, 34)), tlc: random.between(97, 118) };
     }
     case 'restrictive': {
       const fvc = random.between(46, 70);
