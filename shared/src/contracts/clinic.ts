@@ -1,10 +1,9 @@
 import { z } from 'zod';
+import { fev1SeverityRules, ratioRules, tlcSeverityRules } from '../vocabulary';
 import { staffRoles } from '../permissions';
 import { between, cursorQuery, instantOut, listOf, optionalText, text, uuid, version } from './common';
 
-export const ratioRules = ['fixed-ratio', 'lln'] as const;
-export const fev1SeverityRules = ['ats-ers-2005', 'ers-ats-2021', 'gold'] as const;
-export const tlcSeverityRules = ['tlc-percent', 'ers-ats-2021'] as const;
+export { fev1SeverityRules, ratioRules, tlcSeverityRules };
 
 export const clinicRules = {
   ratioRule: z.enum(ratioRules),

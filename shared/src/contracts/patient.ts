@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { diagnosisGroups, enrollmentStatuses, sexesForPrediction } from '../vocabulary';
 import {
   calendarDate,
   cursorQuery,
@@ -12,42 +13,16 @@ import {
   version,
 } from './common';
 
-export const diagnosisGroups = [
-  'copd',
-  'ild',
-  'asthma',
-  'bronchiectasis',
-  'post-covid',
-  'pulmonary-hypertension',
-  'surgery-or-transplant',
-  'other',
-] as const;
-export type DiagnosisGroup = (typeof diagnosisGroups)[number];
-
-export const diagnosisGroupLabels: Record<DiagnosisGroup, string> = {
-  copd: 'COPD',
-  ild: 'ILD',
-  asthma: 'Asthma',
-  bronchiectasis: 'Bronchiectasis',
-  'post-covid': 'Post-COVID',
-  'pulmonary-hypertension': 'Pulmonary hypertension',
-  'surgery-or-transplant': 'Surgery or transplant',
-  other: 'Other',
-};
-
-export const sexesForPrediction = ['male', 'female'] as const;
-export type SexForPrediction = (typeof sexesForPrediction)[number];
-
-export const enrollmentStatuses = [
-  'planned',
-  'active',
-  'paused',
-  'completed',
-  'partly-completed',
-  'withdrawn',
-] as const;
-export type EnrollmentStatus = (typeof enrollmentStatuses)[number];
-export const openEnrollmentStatuses = ['planned', 'active', 'paused'] as const;
+export {
+  diagnosisGroupLabels,
+  diagnosisGroups,
+  enrollmentStatuses,
+  openEnrollmentStatuses,
+  sexesForPrediction,
+  type DiagnosisGroup,
+  type EnrollmentStatus,
+  type SexForPrediction,
+} from '../vocabulary';
 
 const email = z
   .union([z.literal(''), z.email({ error: 'Enter an e-mail address such as name@example.org' }).max(254)])

@@ -1,27 +1,13 @@
 import { z } from 'zod';
+import { gradingRuleIds, referenceGroups, referenceSetIds } from '../vocabulary';
 import { isMeasureId, type MeasureId } from '../measures/registry';
 import { ratioRules } from './clinic';
 import { between, heightCm, weightKg } from './common';
 import { diagnosisGroups, sexesForPrediction } from './patient';
 import { bronchodilatorStates } from './spirometry-test';
 
-/** Sets a caller may name; the walk has one set of its own, which is always used for it. */
-export const referenceSetIds = [
-  'gli-global-2022',
-  'gli-2012',
-  'nhanes-iii-1999',
-  'gli-2021-lung-volumes',
-  'gli-2017-transfer-factor',
-] as const;
-export type ReferenceSetId = (typeof referenceSetIds)[number];
-
-/** Ancestry groups printed in the two legacy sets; asked each time, never stored on a patient. */
-export const referenceGroups = {
-  'gli-2012': ['caucasian', 'african-american', 'north-east-asian', 'south-east-asian', 'other'],
-  'nhanes-iii-1999': ['caucasian', 'african-american', 'mexican-american'],
-} as const;
-
-export const gradingRuleIds = ['ats-ers-2005', 'ers-ats-2021', 'gold', 'tlc-percent', 'dlco-2005', 'default'] as const;
+export { gradingRuleIds, referenceGroups, referenceSetIds };
+export type { ReferenceSetId } from '../vocabulary';
 
 const positive = z.number({ error: 'Must be a number' }).positive('Must be more than 0');
 

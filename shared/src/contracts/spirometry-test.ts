@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { bronchodilatorStates } from '../vocabulary';
 import { checkValue, type MeasureId } from '../measures/registry';
 import {
   amendReason,
@@ -19,8 +20,8 @@ import {
   weightKg,
 } from './common';
 
-export const bronchodilatorStates = ['before', 'after', 'none', 'unknown'] as const;
-export type BronchodilatorState = (typeof bronchodilatorStates)[number];
+export { bronchodilatorStates };
+export type { BronchodilatorState } from '../vocabulary';
 
 /** A number held to the registry's absolute range and step, with the registry's own words. */
 export const measureValue = (measure: MeasureId, label: string) =>

@@ -1,4 +1,5 @@
-import { diagnosisGroupLabels, type PatientListItem } from '@slighthill/shared/contracts/patient';
+import type { PatientListItem } from '@slighthill/shared/contracts/patient';
+import { diagnosisGroupLabels } from '@slighthill/shared/vocabulary';
 import { Link } from 'react-router-dom';
 import { formatDate } from '../../lib/clinic-time';
 import { Badge } from '../../ui/badge';

@@ -1,5 +1,6 @@
 import { useState } from 'react';
-import { diagnosisGroupLabels, openEnrollmentStatuses, type Patient } from '@slighthill/shared/contracts/patient';
+import type { Patient } from '@slighthill/shared/contracts/patient';
+import { diagnosisGroupLabels, openEnrollmentStatuses } from '@slighthill/shared/vocabulary';
 import { formatNumber } from '@slighthill/shared/format';
 import { formatDate } from '../../lib/clinic-time';
 import { usePageTitle } from '../../lib/page-title';

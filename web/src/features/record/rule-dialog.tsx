@@ -1,6 +1,5 @@
 import { useState } from 'react';
-import { fev1SeverityRules, ratioRules } from '@slighthill/shared/contracts/clinic';
-import { referenceGroups } from '@slighthill/shared/contracts/prediction';
+import { fev1SeverityRules, ratioRules, referenceGroups } from '@slighthill/shared/vocabulary';
 import type { TrendPattern } from '@slighthill/shared/contracts/trend';
 import { gradingRuleLabel, referenceSetLabel } from '../../charts/rule-words';
 import { useSessionUser } from '../../lib/session';

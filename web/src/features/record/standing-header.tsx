@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react';
-import { diagnosisGroupLabels, type Patient } from '@slighthill/shared/contracts/patient';
+import type { Patient } from '@slighthill/shared/contracts/patient';
+import { diagnosisGroupLabels } from '@slighthill/shared/vocabulary';
 import { formatDate } from '../../lib/clinic-time';
 import { cx } from '../../ui/cx';
 import { FlagChips } from './flag-chips';

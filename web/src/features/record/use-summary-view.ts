@@ -1,6 +1,5 @@
 import { useSearchParams } from 'react-router-dom';
-import { referenceGroups, referenceSetIds, gradingRuleIds } from '@slighthill/shared/contracts/prediction';
-import { ratioRules } from '@slighthill/shared/contracts/clinic';
+import { gradingRuleIds, ratioRules, referenceGroups, referenceSetIds } from '@slighthill/shared/vocabulary';
 import type { TrendSeries } from '@slighthill/shared/contracts/trend';
 import { getMeasure, isMeasureId } from '@slighthill/shared/measures';
 import { availableViews, defaultView, isTrendView, type TrendView } from '../../charts/trend-view';
