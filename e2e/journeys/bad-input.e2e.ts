@@ -36,7 +36,10 @@ describe('what the spirometry form refuses and asks', () => {
     await drawer.getByText('Until you answer there is no percent predicted.').waitFor();
     await picture(page, 'spirometry-form-errors');
     await drawer.getByRole('button', { name: 'Save test' }).click();
-    await drawer.getByRole('alert').getByText(/FEV1 cannot be more than FVC/).waitFor();
+    await drawer
+      .getByRole('alert')
+      .getByText(/FEV1 cannot be more than FVC/)
+      .waitFor();
 
     await drawer.getByLabel('Maneuver 1, FEV1 in L').fill('1.40');
     await drawer.getByRole('button', { name: 'Yes, 165.1 cm' }).click();

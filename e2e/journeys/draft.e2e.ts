@@ -7,7 +7,9 @@ import { signIn, signOut } from '../fixtures/sign-in';
 import { test } from '../fixtures/test';
 
 describe('a half-filled spirometry form', () => {
-  test('survives a reload and a new sign-in, is its owner’s alone, and goes once the test is saved', async ({ visit }) => {
+  test('survives a reload and a new sign-in, is its owner’s alone, and goes once the test is saved', async ({
+    visit,
+  }) => {
     const { page, planFailure } = await visit({ as: 'therapist' });
     const id = await visit({ as: 'coordinator' }).then((other) => addPatient(other.page, inventPerson()));
     await page.goto(`/patients/${id}/tests`);

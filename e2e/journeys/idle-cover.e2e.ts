@@ -56,7 +56,11 @@ describe('after 15 quiet minutes', () => {
     await cover.getByLabel('Password').fill(demoPassword);
     await cover.getByRole('button', { name: 'Continue' }).click();
     await cover.waitFor({ state: 'detached' });
-    expect(await dialog(page, 'Record body size').getByLabel(/^Weight/).inputValue()).toBe('79.4');
+    expect(
+      await dialog(page, 'Record body size')
+        .getByLabel(/^Weight/)
+        .inputValue(),
+    ).toBe('79.4');
   });
 
   test('another person starts fresh and finds nothing of the first', async ({ visit }) => {

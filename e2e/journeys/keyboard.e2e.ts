@@ -59,7 +59,10 @@ describe('by keyboard alone', () => {
     await page.getByText(`${marks} points.`).waitFor();
     await page.keyboard.press('End');
     await page.keyboard.press('Enter');
-    await page.getByRole('heading', { level: 1, name: '6-minute walk distance' }).or(page.getByRole('heading', { name: '6-minute walk distance', exact: true })).waitFor();
+    await page
+      .getByRole('heading', { level: 1, name: '6-minute walk distance' })
+      .or(page.getByRole('heading', { name: '6-minute walk distance', exact: true }))
+      .waitFor();
     await page.goBack();
     await page.getByRole('application').waitFor();
 

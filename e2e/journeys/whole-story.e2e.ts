@@ -58,7 +58,10 @@ async function enroll(page: Page): Promise<void> {
   await drawer.getByLabel('Start date').fill(firstOn);
   await picture(page, 'enroll-drawer');
   await drawer.getByRole('button', { name: 'Enroll', exact: true }).click();
-  await page.getByRole('status').getByText(/^Enrolled in /).waitFor();
+  await page
+    .getByRole('status')
+    .getByText(/^Enrolled in /)
+    .waitFor();
 }
 
 async function firstSpirometry(page: Page): Promise<void> {
@@ -92,7 +95,11 @@ async function scores(page: Page, on: string, results: readonly (readonly [searc
     await fillResult(drawer, search, value);
     const last = index === results.length - 1;
     await drawer.getByRole('button', { name: last ? 'Save result' : 'Save and add another' }).click();
-    if (!last) await drawer.getByRole('status').getByText(new RegExp(`^In the record: (.*, ){${index}}[^,]+$`)).waitFor();
+    if (!last)
+      await drawer
+        .getByRole('status')
+        .getByText(new RegExp(`^In the record: (.*, ){${index}}[^,]+$`))
+        .waitFor();
   }
   await savedNote(page, /^Saved\. /);
 }
@@ -135,10 +142,15 @@ async function chartAndTwin(page: Page): Promise<void> {
     new RegExp(`^${writtenDay(firstOn)}, baseline\\. FEV1 1\\.10 L, 47% of 2\\.36 L.*Severe, 35 to under 50.*64\\.5`),
   );
   expect(announced.find((words) => words.includes(', latest.'))).toMatch(
-    new RegExp(`^${writtenDay(secondOn)}, latest\\. FEV1 1\\.43 L, 61% of 2\\.34 L.*Moderate, 60 to under 70.*165\\.1 cm`),
+    new RegExp(
+      `^${writtenDay(secondOn)}, latest\\. FEV1 1\\.43 L, 61% of 2\\.34 L.*Moderate, 60 to under 70.*165\\.1 cm`,
+    ),
   );
   await page.getByRole('button', { name: 'Show as table' }).click();
-  const rows = page.getByRole('region', { name: 'Trend' }).getByRole('row').filter({ has: page.getByRole('link') });
+  const rows = page
+    .getByRole('region', { name: 'Trend' })
+    .getByRole('row')
+    .filter({ has: page.getByRole('link') });
   expect(await rows.count()).toBe(announced.length);
   for (const [index, words] of announced.entries()) {
     const [, value, percent] = /FEV1 (\d\.\d\d L), (\d+%)/.exec(words) ?? [];
@@ -177,10 +189,7 @@ async function amendCat(page: Page): Promise<void> {
 
 async function voidWalk(page: Page): Promise<void> {
   await page.getByRole('link', { name: /^Tests/ }).click();
-  await page
-    .getByRole('row', { name: /352 m/ })
-    .getByRole('link')
-    .click();
+  await page.getByRole('row', { name: /352 m/ }).getByRole('link').click();
   await page.getByRole('button', { name: 'Void' }).click();
   const asked = dialog(page, /^Void this 6MWD/);
   await asked.getByRole('radio', { name: 'Wrong patient' }).check();
