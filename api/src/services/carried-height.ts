@@ -1,4 +1,4 @@
-import { selectRow } from '../db/query';
+import { selectRow, selectRows } from '../db/query';
 import type { HeightMethod } from '@slighthill/shared/contracts/common';
 
 export interface Height {
@@ -7,19 +7,36 @@ export interface Height {
   heightCarried: boolean;
 }
 
-/**
- * The newest measured height up to the instant and at most 12 months old, or null. A result recorded without a height
- * uses it, marked as carried.
- */
+/** The newest measured height up to the instant and at most 12 months old, that the source itself did not bring. */
+const newestSql = (at: string, sourceId: string) => /* sql */ `
+  select b.height_cm::float8 as "heightCm", b.height_method as "heightMethod"
+  from body_sizes b
+  where b.patient_id = $patientId and b.voided_at is null and b.height_cm is not null and b.height_method = 'measured'
+    and b.taken_at <= ${at} and b.taken_at >= ${at} - interval '12 months'
+    and b.source_id is distinct from ${sourceId}
+  order by b.taken_at desc, b.id desc limit 1`;
+
+type Found = Omit<Height, 'heightCarried'>;
+
+/** The height a result recorded without one uses, marked as carried, or null. */
 export async function carriedHeight(patientId: string, at: Date, exceptSourceId?: string): Promise<Height | null> {
-  const row = await selectRow<{ heightCm: number; heightMethod: HeightMethod }>(
-    `select height_cm::float8 as "heightCm", height_method as "heightMethod"
-     from body_sizes
-     where patient_id = $patientId and voided_at is null and height_cm is not null and height_method = 'measured'
-       and taken_at <= $at and taken_at >= $at::timestamptz - interval '12 months'
-       and source_id is distinct from $exceptSourceId
-     order by taken_at desc, id desc limit 1`,
-    { patientId, at, exceptSourceId },
-  );
+  const row = await selectRow<Found>(newestSql('$at::timestamptz', '$exceptSourceId::uuid'), {
+    patientId,
+    at,
+    exceptSourceId,
+  });
   return row ? { ...row, heightCarried: true } : null;
+}
+
+/** The same for every current result of a patient that has no height of its own, in one statement, by source. */
+export async function carriedHeightsOf(patientId: string): Promise<Map<string, Height>> {
+  const rows = await selectRows<Found & { sourceId: string }>(
+    `select m.source_id as "sourceId", h.*
+     from (select distinct source_id, taken_at from measurements
+       where patient_id = $patientId and voided_at is null and source_kind in ('measurement', 'body-size')
+         and (height_carried or height_cm is null)) m
+     cross join lateral (${newestSql('m.taken_at', 'm.source_id')}) h`,
+    { patientId },
+  );
+  return new Map(rows.map(({ sourceId, ...height }) => [sourceId, { ...height, heightCarried: true }]));
 }

@@ -3,7 +3,7 @@ import { Op } from 'sequelize';
 import { requireTransaction } from '../db/in-transaction';
 import { Measurement } from '../models/measurement';
 import type { Patient } from '../models/patient';
-import { carriedHeight } from './carried-height';
+import { carriedHeightsOf } from './carried-height';
 import type { CommandContext } from './command-context';
 import { withDerivedFacts } from './derived-facts';
 import { syncMeasurements, type Fact } from './sync-measurements';
@@ -25,9 +25,11 @@ export async function refreshCarriedHeights(context: CommandContext, patient: Pa
   });
   const bySource = new Map<string, Measurement[]>();
   for (const row of rows) bySource.set(row.sourceId, [...(bySource.get(row.sourceId) ?? []), row]);
+  if (bySource.size === 0) return;
+  const heights = await carriedHeightsOf(patient.id);
   for (const [sourceId, group] of bySource) {
     const first = group[0]!;
-    const height = await carriedHeight(patient.id, first.takenAt, sourceId);
+    const height = heights.get(sourceId) ?? null;
     if ((height?.heightCm ?? null) === first.heightCm) continue;
     const source = {
       kind: first.sourceKind,
