@@ -237,4 +237,17 @@ describe('the number of statements a list takes', () => {
     // the session, the rows (with those beside them) and the audit event
     for (const [name, count] of Object.entries(many)) expect([name, count >= 2 && count <= 6]).toEqual([name, true]);
   });
+
+  it('of a write does not grow with the results that carry a height', async () => {
+    const patientId = await addPatient(own);
+    await addBodySize(own, patientId, { takenAt: '2026-01-10T15:00:00Z' });
+    const record = async () =>
+      (await queriesOf(server, () => addBodySize(own, patientId, { takenAt: '2026-01-11T15:00:00Z' }))).length;
+    await addMeasurement(own, patientId);
+    await record();
+    const few = await record();
+    for (let i = 0; i < 6; i += 1) await addMeasurement(own, patientId);
+    await record();
+    expect(await record()).toBe(few);
+  });
 });
