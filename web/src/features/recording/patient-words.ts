@@ -1,4 +1,5 @@
-import { diagnosisGroupLabels, type Patient } from '@slighthill/shared/contracts/patient';
+import type { Patient } from '@slighthill/shared/contracts/patient';
+import { diagnosisGroupLabels } from '@slighthill/shared/vocabulary';
 
 /** Whose record a drawer writes to: "Ruth Valdane, 65, COPD". */
 export const patientWords = (

@@ -62,8 +62,10 @@ export const TestDetailView = ({ detail, actions }: TestDetailViewProps) => {
           <p className="mt-2 text-note text-ink-soft">Quality is not graded yet.</p>
         </section>
       )}
-      <section>
-        <h2 className="mb-1 text-section">History</h2>
+      <section aria-labelledby="test-history">
+        <h2 id="test-history" className="mb-1 text-section">
+          History
+        </h2>
         <HistoryList history={detail.history} factsOf={inWords} now={inWords(contentOf(detail))} />
       </section>
     </article>
