@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { bandStrips, limitWords } from './band-strips';
+import { courseLabels } from './course-labels';
 import { dodge } from './dodge';
 import { differenceBracket } from './important-difference';
 import { llnLine } from './lln-line';
@@ -216,6 +217,23 @@ describe('difference bracket and LLN', () => {
     expect(llnLine(fev1Series, 'value')?.label).toBe('LLN, 2.20');
     expect(llnLine(fev1Series, 'z')?.label).toBe('LLN, \u22121.645');
     expect(llnLine(catSeries, 'value')).toBeNull();
+    expect(llnLine(fev1Series, 'value')?.steady).toBe(true);
+    const falling = fev1Series.points.map((point, index) => ({ ...point, lln: 2.3 - index * 0.02 }));
+    expect(llnLine({ ...fev1Series, points: falling }, 'value')).toMatchObject({ label: 'LLN, 2.18', steady: false });
+  });
+});
+
+describe('courseLabels', () => {
+  const room = { left: 34, width: 1064, narrow: false };
+  const words = (start: number, end: number | null) =>
+    courseLabels(course, { ...room, start, end }).map((label) => `${label.anchor} ${label.words}`);
+
+  it('stand between the verticals where they fit, else outside, else as one phrase', () => {
+    expect(words(600, 850)).toEqual(['start Enrolled Sep 14', 'end Planned end Dec 9']);
+    expect(words(600, 750)).toEqual(['end Enrolled Sep 14', 'end Planned end Dec 9']);
+    expect(words(600, 650)).toEqual(['end Enrolled Sep 14', 'start Planned end Dec 9']);
+    expect(words(980, 1030)).toEqual(['end Enrolled Sep 14, planned end Dec 9']);
+    expect(words(600, null)).toEqual(['start Enrolled Sep 14']);
   });
 });
 

@@ -7,8 +7,10 @@ import type { TrendView } from './trend-view';
 export interface LlnLine {
   /** One per day that has a lower limit, oldest first. */
   points: { day: number; value: number }[];
-  /** "LLN, 73". */
+  /** The latest value: "LLN, 73". */
   label: string;
+  /** Whether the first value reads the same, so that the label may stand at the left edge. */
+  steady: boolean;
 }
 
 /** The lower limit is a raw value; the percent view only changes its scale. */
@@ -24,9 +26,9 @@ export const llnLine = (series: TrendSeries, view: TrendView): LlnLine | null =>
     const value = llnInView(point, view);
     return value === null ? [] : [{ day: dayNumber(point.takenOn), value }];
   });
-  const last = points.at(-1);
-  if (!last) return null;
-  const words =
-    view === 'value' ? formatValue(series.measure, last.value) : formatNumber(last.value, view === 'z' ? 3 : 0);
-  return { points, label: `LLN, ${words}` };
+  const [first, last] = [points[0], points.at(-1)];
+  if (!first || !last) return null;
+  const write = (value: number): string =>
+    view === 'value' ? formatValue(series.measure, value) : formatNumber(value, view === 'z' ? 3 : 0);
+  return { points, label: `LLN, ${write(last.value)}`, steady: write(first.value) === write(last.value) };
 };

@@ -35,7 +35,17 @@ export const latestLabel = (
 };
 
 export const PlotLatest = ({ label }: { label: LatestLabel }) => (
-  <text x={label.x} y={label.y} textAnchor={label.anchor} fill="var(--ink)" fontSize={13}>
+  <text
+    x={label.x}
+    y={label.y}
+    textAnchor={label.anchor}
+    fill="var(--ink)"
+    fontSize={13}
+    // Above its point it may lie on the line, so it gets a rim to stay readable.
+    {...(label.anchor === 'end'
+      ? { stroke: 'var(--paper)', strokeWidth: 3, strokeOpacity: 0.8, paintOrder: 'stroke' }
+      : {})}
+  >
     <tspan fontSize={15} fontWeight={700}>
       {label.strong}
     </tspan>

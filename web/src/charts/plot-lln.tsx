@@ -23,7 +23,13 @@ export const PlotLln = ({ layout: { frame, x, y }, line }: PlotLlnProps) => {
         strokeWidth={1.6}
         strokeDasharray="6 5"
       />
-      <text x={frame.left + 8} y={first.y - 6} fontSize={13} fill="var(--heather)">
+      <text
+        x={line.steady ? frame.left + 8 : frame.right - 8}
+        y={(line.steady ? first : last).y - 6}
+        textAnchor={line.steady ? 'start' : 'end'}
+        fontSize={13}
+        fill="var(--heather)"
+      >
         {line.label}
       </text>
     </g>

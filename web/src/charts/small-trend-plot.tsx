@@ -6,6 +6,9 @@ interface SmallTrendPlotProps {
   width: number;
 }
 
+/** More marks than this would hide the line. */
+const mostMarks = 12;
+
 /** Zone, dotted baseline, line and marks: shared by the small chart and the one in rows. */
 export const SmallTrendPlot = ({ layout: { points, baselineY, zone }, width }: SmallTrendPlotProps) => {
   const last = points.at(-1);
@@ -25,7 +28,7 @@ export const SmallTrendPlot = ({ layout: { points, baselineY, zone }, width }: S
       {points.length > 1 && (
         <LinePath data={points} x={(at) => at.x} y={(at) => at.y} stroke="var(--ink)" strokeWidth={2} />
       )}
-      {points.map((at) => (
+      {(points.length > mostMarks ? points.slice(-1) : points).map((at) => (
         <circle
           key={at.x}
           cx={at.x}
