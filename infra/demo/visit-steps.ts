@@ -55,7 +55,13 @@ export function visitSteps(person: Person, visit: Visit, timeZone: string): Demo
   const oxygenLpm = visit.oxygenLpm;
   const common = [
     typed(30, { kind: 'spirometry', body: spirometry }),
-    value(66, 'sixMinuteWalkDistance', wellbeing.walkM, { courseM: visit.courseM, walks: 2, oxygenLpm, aid: 'none' }),
+    value(
+      66,
+      'sixMinuteWalkDistance',
+      wellbeing.walkM,
+      { courseM: visit.courseM, walks: 2, oxygenLpm, aid: 'none' },
+      { weightKg: visit.weightKg },
+    ),
     value(67, 'spo2Nadir', wellbeing.spo2Nadir, { oxygenLpm }),
     value(80, 'mmrc', wellbeing.mmrc),
     value(82, 'cat', wellbeing.cat),
