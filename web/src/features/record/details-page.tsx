@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { lazy, Suspense, useState } from 'react';
 import type { Patient } from '@slighthill/shared/contracts/patient';
 import { diagnosisGroupLabels, openEnrollmentStatuses } from '@slighthill/shared/vocabulary';
 import { formatNumber } from '@slighthill/shared/format';
@@ -6,12 +6,17 @@ import { formatDate } from '../../lib/clinic-time';
 import { usePageTitle } from '../../lib/page-title';
 import { Button } from '../../ui/button';
 import { SavedNote } from '../../ui/saved-note';
-import { ChangeEnrollmentDrawer } from './change-enrollment-drawer';
 import { DetailList } from './detail-list';
-import { EditPatientDrawer } from './edit-patient-drawer';
-import { EnrollDrawer } from './enroll-drawer';
 import { enrollmentStatusLabels } from './record-words';
 import { useRecord } from './record-context';
+
+const EditPatientDrawer = lazy(() =>
+  import('./edit-patient-drawer').then((module) => ({ default: module.EditPatientDrawer })),
+);
+const EnrollDrawer = lazy(() => import('./enroll-drawer').then((module) => ({ default: module.EnrollDrawer })));
+const ChangeEnrollmentDrawer = lazy(() =>
+  import('./change-enrollment-drawer').then((module) => ({ default: module.ChangeEnrollmentDrawer })),
+);
 
 type Open = 'patient' | 'enroll' | 'enrollment' | null;
 
@@ -107,28 +112,30 @@ export const PatientDetails = () => {
           )
         }
       />
-      {open === 'patient' && (
-        <EditPatientDrawer
-          patient={patient}
-          onClose={() => setOpen(null)}
-          onSaved={() => finish('Saved in the record')}
-        />
-      )}
-      {open === 'enroll' && (
-        <EnrollDrawer
-          patient={patient}
-          onClose={() => setOpen(null)}
-          onSaved={(program) => finish(`Enrolled in ${program}`)}
-        />
-      )}
-      {open === 'enrollment' && enrollment && (
-        <ChangeEnrollmentDrawer
-          patient={patient}
-          enrollment={enrollment}
-          onClose={() => setOpen(null)}
-          onSaved={() => finish('Enrollment changed')}
-        />
-      )}
+      <Suspense>
+        {open === 'patient' && (
+          <EditPatientDrawer
+            patient={patient}
+            onClose={() => setOpen(null)}
+            onSaved={() => finish('Saved in the record')}
+          />
+        )}
+        {open === 'enroll' && (
+          <EnrollDrawer
+            patient={patient}
+            onClose={() => setOpen(null)}
+            onSaved={(program) => finish(`Enrolled in ${program}`)}
+          />
+        )}
+        {open === 'enrollment' && enrollment && (
+          <ChangeEnrollmentDrawer
+            patient={patient}
+            enrollment={enrollment}
+            onClose={() => setOpen(null)}
+            onSaved={() => finish('Enrollment changed')}
+          />
+        )}
+      </Suspense>
     </>
   );
 };

@@ -1,8 +1,9 @@
-import { useState } from 'react';
+import { lazy, Suspense, useState } from 'react';
 import type { TrendResponse } from '@slighthill/shared/contracts/trend';
 import { numbersSentence, rulesSentence } from './pattern-sentences';
-import { RuleDialog } from './rule-dialog';
 import type { SummaryView } from './use-summary-view';
+
+const RuleDialog = lazy(() => import('./rule-dialog').then((module) => ({ default: module.RuleDialog })));
 
 interface PatternSummaryProps {
   trends: TrendResponse;
@@ -58,15 +59,17 @@ export const PatternSummary = ({ trends, view }: PatternSummaryProps) => {
         )}
       </div>
       {choosing && (
-        <RuleDialog
-          rules={view.rules}
-          pattern={pattern}
-          onClose={() => setChoosing(false)}
-          onChoose={(rules) => {
-            setChoosing(false);
-            view.changeRules(rules);
-          }}
-        />
+        <Suspense>
+          <RuleDialog
+            rules={view.rules}
+            pattern={pattern}
+            onClose={() => setChoosing(false)}
+            onChoose={(rules) => {
+              setChoosing(false);
+              view.changeRules(rules);
+            }}
+          />
+        </Suspense>
       )}
     </section>
   );

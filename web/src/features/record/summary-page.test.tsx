@@ -120,7 +120,7 @@ describe('summary', () => {
   it('looks by another rule in the address only, and asks the group of a legacy set', async () => {
     const { user, seen, address } = renderRecord(summary, { patient, trends: [aTrendResponse()] });
     await user.click(await screen.findByRole('button', { name: 'Change rule' }));
-    await user.selectOptions(screen.getByRole('combobox', { name: 'Reference set for spirometry' }), 'gli-2012');
+    await user.selectOptions(await screen.findByRole('combobox', { name: 'Reference set for spirometry' }), 'gli-2012');
     await user.click(screen.getByRole('button', { name: 'Show' }));
     expect(screen.getByText('This set needs a group')).toBeVisible();
     expect(address()).toBe(summary);
@@ -164,7 +164,7 @@ describe('summary', () => {
     const failed = problem('unavailable', 'The server is busy or restarting.');
     const { user } = renderRecord(summary, { patient, trends: [aTrendResponse(), failed] });
     await user.click(await screen.findByRole('button', { name: 'Change rule' }));
-    await user.click(screen.getByRole('radio', { name: /^LLN/ }));
+    await user.click(await screen.findByRole('radio', { name: /^LLN/ }));
     await user.click(screen.getByRole('button', { name: 'Show' }));
     expect(await screen.findByRole('alert')).toHaveTextContent('What was loaded stays here.');
     expect(
