@@ -13,17 +13,14 @@ async function look(page: Page, state: string, options: { whole?: boolean } = {}
 }
 
 /** Holds back the answers of an address until `letGo`, so that the waiting state can be looked at. */
-async function holdBack(page: Page, address: string | RegExp): Promise<() => Promise<void>> {
+async function holdBack(page: Page, address: RegExp): Promise<() => void> {
   let letGo = (): void => undefined;
   const held = new Promise<void>((resolve) => (letGo = resolve));
   await page.route(address, async (route) => {
     await held;
     await route.continue();
   });
-  return async () => {
-    letGo();
-    await page.unroute(address);
-  };
+  return () => letGo();
 }
 
 /** Reloads with an address that cannot be reached, looks at what the page says, and lets it work again. */
@@ -56,7 +53,7 @@ async function lookAtPatients(visitor: Visitor): Promise<void> {
   await page.reload();
   await page.getByText('Loading patients').waitFor({ state: 'attached' });
   await look(page, 'patients-loading');
-  await letGo();
+  letGo();
   await page.getByRole('table').waitFor();
   await look(page, 'patients-list');
   await page.getByRole('searchbox').fill('nobody has this name');
@@ -99,7 +96,7 @@ async function lookAtSummary(visitor: Visitor): Promise<void> {
   await page.getByRole('heading', { level: 1 }).waitFor();
   await page.getByText('Loading the charts').waitFor({ state: 'attached' });
   await look(page, 'record-summary-loading');
-  await letGo();
+  letGo();
   await lookWithout(visitor, /\/trends/, 'record-summary-error', /The summary could not be loaded/);
   await page.getByRole('region', { name: 'Pattern' }).waitFor();
 }
@@ -134,7 +131,7 @@ async function lookAtRecording({ page }: Visitor): Promise<void> {
   await page.keyboard.press('Escape');
   const spirometry = await openRecordDrawer(page, 'Spirometry');
   await look(page, 'spirometry-form');
-  await spirometry.getByRole('radio', { name: 'Best values only' }).check();
+  await spirometry.getByRole('checkbox', { name: 'Best values only' }).check();
   await spirometry.getByLabel('FVC', { exact: true }).waitFor();
   await look(page, 'spirometry-form-best');
   await spirometry.getByRole('button', { name: 'Keep as draft' }).click();

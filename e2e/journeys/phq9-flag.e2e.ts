@@ -23,7 +23,7 @@ describe('a PHQ-9 whose ninth answer is not zero', () => {
     await drawer.getByText('Saving raises a safety flag.').waitFor();
     await picture(page, 'result-phq9');
     await drawer.getByRole('button', { name: 'Save result' }).click();
-    await savedNote(page, /PHQ-9 4 is in Tests/);
+    await savedNote(page, /PHQ-9 4\b.* is in Tests/);
 
     const flags = page.getByRole('list', { name: 'Open flags' });
     await flags.getByRole('button', { name: 'PHQ-9 ninth answer' }).click();
