@@ -11,6 +11,15 @@ const clinicSections: RouteObject[] = [
   { path: 'audit', lazy: () => import('../features/clinic/audit-page') },
 ];
 
+const recordSections: RouteObject[] = [
+  { index: true, element: <Navigate to="summary" replace /> },
+  { path: 'summary', lazy: () => import('../features/record/summary-page') },
+  { path: 'tests', lazy: () => import('../features/recording/tests-page') },
+  { path: 'tests/:kind/:testId', lazy: () => import('../features/recording/test-detail-page') },
+  { path: 'file', lazy: () => import('../features/recording/file-page') },
+  { path: 'details', lazy: () => import('../features/record/details-page') },
+];
+
 const signedInRoutes: RouteObject[] = [
   { index: true, lazy: () => import('./first-page') },
   {
@@ -18,6 +27,7 @@ const signedInRoutes: RouteObject[] = [
     lazy: () => import('../features/patients/patients-page'),
     children: [{ path: 'new', lazy: () => import('../features/patients/new-patient-drawer') }],
   },
+  { path: 'patients/:patientId', lazy: () => import('./record-route'), children: recordSections },
   { path: 'clinic', lazy: () => import('../features/clinic/clinic-page'), children: clinicSections },
   { path: 'home', lazy: () => import('../features/home/home-page') },
   { path: '*', element: <NotFoundPage /> },
