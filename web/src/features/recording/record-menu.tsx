@@ -1,4 +1,4 @@
-import { lazy, Suspense, useState } from 'react';
+import { lazy, Suspense, useEffect, useRef, useState } from 'react';
 import type { Patient } from '@slighthill/shared/contracts/patient';
 import { Link } from 'react-router-dom';
 import { Button } from '../../ui/button';
@@ -31,6 +31,18 @@ interface RecordMenuProps {
 export const RecordMenu = ({ patient }: RecordMenuProps) => {
   const [open, setOpen] = useState<DrawerName | null>(null);
   const [saved, setSaved] = useState<Saved | null>(null);
+  const button = useRef<HTMLButtonElement>(null);
+  const wasOpen = useRef(false);
+  useEffect(() => {
+    if (open !== null) {
+      wasOpen.current = true;
+      return undefined;
+    }
+    if (!wasOpen.current) return undefined;
+    // The menu's item that opened the drawer is gone: the focus goes back to the button, after the drawer lets go of it.
+    const timer = window.setTimeout(() => button.current?.focus());
+    return () => window.clearTimeout(timer);
+  }, [open]);
   const mayRecord = patient.abilities.includes('record');
   const mayWriteFile = patient.abilities.includes('write-file') || patient.abilities.includes('order-oxygen');
   if (!mayRecord && !mayWriteFile) return null;
@@ -73,7 +85,7 @@ export const RecordMenu = ({ patient }: RecordMenuProps) => {
       </p>
       <Menu
         trigger={
-          <Button kind="main" icon="plus">
+          <Button ref={button} kind="main" icon="plus">
             Record
           </Button>
         }

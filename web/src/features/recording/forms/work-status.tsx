@@ -35,7 +35,7 @@ const DraftWords = ({ draft }: { draft: DraftState }) => {
 /** Where the work is and what is open, at the left of a drawer's foot. */
 export const WorkStatus = ({ problem, draft, openQuestions = 0 }: WorkStatusProps) => (
   <>
-    <div className="mr-auto min-w-0 flex-1 basis-40 text-note">
+    <div className="mr-auto min-w-0 flex-1 basis-full text-note row:basis-40">
       <p role="alert" className="flex items-start gap-2 font-semibold text-rowan">
         {problem && (
           <>

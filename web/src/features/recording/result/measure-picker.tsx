@@ -1,5 +1,5 @@
 import { measureGroups, type MeasureGroup, type MeasureId } from '@slighthill/shared/measures';
-import { useId, useMemo, useRef, useState, type KeyboardEvent, type Ref } from 'react';
+import { useEffect, useId, useMemo, useRef, useState, type KeyboardEvent, type Ref } from 'react';
 import { cx } from '../../../ui/cx';
 import { TextInput } from '../../../ui/text-input';
 import { enterableMeasures } from './result-form';
@@ -60,6 +60,19 @@ export const MeasurePicker = ({ value, onChoose, ref }: MeasurePickerProps) => {
     if (option) list.current?.querySelector(`[data-measure="${option.id}"]`)?.scrollIntoView({ block: 'nearest' });
   };
 
+  useEffect(() => {
+    if (!open) return undefined;
+    // Escape closes the list and not the drawer, which listens on the document: the window hears it first.
+    const closeList = (event: globalThis.KeyboardEvent): void => {
+      if (event.key !== 'Escape') return;
+      event.stopPropagation();
+      event.preventDefault();
+      setSearch(null);
+    };
+    window.addEventListener('keydown', closeList, { capture: true });
+    return () => window.removeEventListener('keydown', closeList, { capture: true });
+  }, [open]);
+
   const press = (event: KeyboardEvent): void => {
     if (event.key === 'ArrowDown' || event.key === 'ArrowUp') {
       event.preventDefault();
@@ -69,12 +82,6 @@ export const MeasurePicker = ({ value, onChoose, ref }: MeasurePickerProps) => {
     if (event.key === 'Enter' && open) {
       event.preventDefault();
       if (current) choose(current.id);
-    }
-    if (event.key === 'Escape' && open) {
-      // Closes the list, not the drawer.
-      event.stopPropagation();
-      event.preventDefault();
-      setSearch(null);
     }
   };
 

@@ -1,12 +1,15 @@
 import { screen, waitFor } from '@testing-library/react';
-import { getMeasure } from '@slighthill/shared/measures';
+import { getMeasure, type MeasureId } from '@slighthill/shared/measures';
+import { FormProvider } from 'react-hook-form';
 import { describe, expect, it, vi } from 'vitest';
 import { plan } from '../testing/record-api';
 import { measurementOf, ruth } from '../testing/record-data';
 import { planQuietRecord, renderRecord } from '../testing/render-record';
 import { findMeasures } from './measure-picker';
+import { useRecordForm } from '../forms/use-record-form';
 import { ResultDrawer } from './result-drawer';
-import { emptyResultForm, enterableMeasures, usualConditions } from './result-form';
+import { ResultFields } from './result-fields';
+import { emptyResultForm, enterableMeasures, usualConditions, type ResultForm } from './result-form';
 import { resultQuestions } from './result-questions';
 import { checkResult } from './result-request';
 import { isFlagged } from './safety-item-field';
@@ -76,7 +79,46 @@ describe('the result form, by the registry', () => {
   });
 });
 
+const OneMeasure = ({ measure }: { measure: MeasureId }) => {
+  const start: ResultForm = {
+    ...emptyResultForm('2026-10-14T10:26', id),
+    measure,
+    conditions: usualConditions(measure),
+  };
+  const state = useRecordForm({ start, check: () => [], ask: () => [] });
+  return (
+    <FormProvider {...state.form}>
+      <ResultFields state={state} earlierHeight={null} amending={false} />
+    </FormProvider>
+  );
+};
+
+describe('the fields of a result', () => {
+  it.each(enterableMeasures)('$id has its value, its conditions and its body size', (measure) => {
+    renderRecord(<OneMeasure measure={measure.id} />);
+    if (measure.gradeDescriptions) expect(screen.getAllByRole('radio')).toHaveLength(measure.gradeDescriptions.length);
+    else expect(screen.getByRole('textbox', { name: measure.label })).toBeVisible();
+    for (const { label, type } of Object.values(measure.conditions)) {
+      const role = { number: 'textbox', choice: 'combobox', boolean: 'group' }[type];
+      expect(screen.getByRole(role, { name: label })).toBeVisible();
+    }
+    expect(screen.queryAllByRole('textbox', { name: /^Height/ })).toHaveLength(measure.referenceKind ? 1 : 0);
+    expect(screen.queryAllByRole('group', { name: measure.safetyItem?.label ?? 'none' })).toHaveLength(
+      measure.safetyItem ? 1 : 0,
+    );
+  });
+});
+
 describe('the result drawer', () => {
+  it('closes the list with Escape, not the drawer', async () => {
+    const { user, picker } = await open();
+    await user.click(picker);
+    expect(picker).toHaveAttribute('aria-expanded', 'true');
+    await user.keyboard('{Escape}');
+    expect(picker).toHaveAttribute('aria-expanded', 'false');
+    expect(screen.getByRole('dialog', { name: 'Record a result' })).toBeVisible();
+  });
+
   it('draws what the registry declares for the walk', async () => {
     const { user, choose, onSaved } = await open();
     const sent = plan('POST /api/patients/:id/measurements', {
