@@ -8,10 +8,15 @@ export function originCheck(publicOrigin: string | undefined): RequestHandler {
   return (request, _response, next) => {
     if (readOnly.has(request.method)) return next();
     const origin = request.get('origin');
-    const allowed = publicOrigin ? new URL(publicOrigin).host : request.get('host');
-    if (origin && allowed && hostOf(origin) === allowed) return next();
+    if (origin && isOwn(origin, request.get('host'), publicOrigin)) return next();
     next(new AppError('foreign-origin', 'Nothing was stored. Open the page again from its own address.'));
   };
+}
+
+/** Behind a proxy the whole public origin must match; on loopback the host and port do. */
+function isOwn(origin: string, host: string | undefined, publicOrigin: string | undefined): boolean {
+  if (publicOrigin) return origin === new URL(publicOrigin).origin;
+  return host !== undefined && hostOf(origin) === host;
 }
 
 function hostOf(origin: string): string | null {

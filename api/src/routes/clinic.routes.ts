@@ -156,6 +156,11 @@ export const clinicRoutes: Route[] = [
     contract: { summary: 'Who saw or changed what, newest first', query: auditQuery, response: auditList },
     access: 'audit:read',
     audit: 'audit.read',
-    handler: async ({ context, query }) => await listAuditEvents(context.actor, query, presentAuditEvent),
+    handler: async ({ context, query }) => {
+      const list = await listAuditEvents(context.actor, query, presentAuditEvent);
+      // the trail names patients, so reading it is an event as well
+      context.audit.showsPatients(...list.items.flatMap((event) => event.patients.map((patient) => patient.id)));
+      return list;
+    },
   }),
 ];

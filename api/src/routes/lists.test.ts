@@ -181,7 +181,10 @@ describe('the lists of a record', () => {
     const ids = (pages: Item[][]) => pages.flat().map((row) => row.id);
     const trail = `/api/audit-events?patient=${patientId}`;
     const whole = ids(await allPages(administrator, trail, 100));
-    expect(ids(await allPages(administrator, trail, 7))).toEqual(whole);
+    // reading the trail is an event of its own, so the second reading starts with what the first one added
+    const paged = ids(await allPages(administrator, trail, 7));
+    expect(paged.filter((id) => BigInt(id) <= BigInt(whole[0]!))).toEqual(whole);
+    expect(new Set(paged).size).toBe(paged.length);
     expect(whole.map(BigInt)).toEqual(whole.map(BigInt).sort((x, y) => (x > y ? -1 : 1)));
     const staff = ids(await allPages(administrator, '/api/users', 1));
     expect(new Set(staff)).toEqual(

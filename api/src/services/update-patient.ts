@@ -1,5 +1,8 @@
 import type { PatientPatch } from '@slighthill/shared/contracts/patient';
+import { wholeYears } from '@slighthill/shared/calendar';
 import { searchKey } from '@slighthill/shared/search-key';
+import { selectRow } from '../db/query';
+import { invalidInput } from '../errors/app-error';
 import { Patient } from '../models/patient';
 import { runCommand, type CommandContext } from './command-context';
 import { checkBirthDate, nameKeys, refuseTakenNumber, writeDiagnosis } from './create-patient';
@@ -23,7 +26,10 @@ export async function updatePatient(context: CommandContext, id: string, body: P
       ) as typeof fields,
     );
     if (Object.keys(changes).length === 0) return patient;
-    if (changes.birthDate) checkBirthDate(context, changes.birthDate);
+    if (changes.birthDate) {
+      checkBirthDate(context, changes.birthDate);
+      await refuseTestsBefore18(context, patient.id, changes.birthDate);
+    }
     if (changes.recordNumber) await refuseTakenNumber(context, changes.recordNumber, patient.id);
     await patient.update({
       ...changes,
@@ -36,4 +42,15 @@ export async function updatePatient(context: CommandContext, id: string, body: P
       await refreshSummaries(context, patient);
     return patient;
   });
+}
+
+/** A corrected birth date must leave every test that stands on or after the 18th birthday. */
+async function refuseTestsBefore18(context: CommandContext, patientId: string, birthDate: string): Promise<void> {
+  const first = await selectRow<{ on: string | null }>(
+    `select min((taken_at at time zone $timeZone)::date)::text as "on" from measurements
+     where patient_id = $patientId and voided_at is null`,
+    { patientId, timeZone: context.actor.clinic.timeZone },
+  );
+  if (!first?.on || wholeYears(birthDate, first.on) >= 18) return;
+  throw invalidInput({ path: 'birthDate', message: `The patient would have been under 18 at the test of ${first.on}` });
 }
