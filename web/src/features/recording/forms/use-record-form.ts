@@ -66,10 +66,11 @@ export const useRecordForm = <Form extends AskingForm>({
     sent.current = JSON.stringify(values);
   });
   useEffect(() => remember(), [submitCount]);
-  useEffect(() => {
+  const follow = useEffectEvent(() => {
     // After a refused save the marks follow what is typed; what the server marked stays until something changes.
-    if (submitCount > 0 && JSON.stringify(settled) !== sent.current) void trigger();
-  }, [settled, submitCount, trigger]);
+    if (submitCount > 0 && JSON.stringify(settled) !== sent.current && settled === values) void trigger();
+  });
+  useEffect(() => follow(), [settled]);
 
   const put = (path: string, value: unknown): void =>
     setValue(path as FieldPath<Form>, value as never, { shouldDirty: true, shouldTouch: true });

@@ -202,7 +202,7 @@ describe('the spirometry drawer', () => {
         { path: 'maneuvers.1.fvc', message: 'Too far from the others' },
       ]),
     );
-    const { put, height, blow, cell, save } = await open();
+    const { user, put, height, blow, cell, save } = await open();
     await put(height, '165');
     await blow(1, '1.38', '2.36');
     await blow(3, '1.39', '2.30');
@@ -210,5 +210,7 @@ describe('the spirometry drawer', () => {
     expect(await screen.findByText('Maneuver 3: Too far from the others')).toBeVisible();
     expect(screen.getByText('Not saved. Your numbers are here. See the marked fields.')).toBeVisible();
     expect(cell(3, 'FVC in L')).toHaveFocus();
+    await user.keyboard('{End}5');
+    await waitFor(() => expect(screen.queryByText('Maneuver 3: Too far from the others')).not.toBeInTheDocument());
   });
 });
