@@ -43,7 +43,6 @@ describe('a PHQ-9 whose ninth answer is not zero', () => {
     await own.getByRole('button', { name: 'Resolve flag' }).click();
     await therapist.getByRole('button', { name: 'PHQ-9 ninth answer' }).waitFor({ state: 'detached' });
     await page.reload();
-    await page.getByRole('heading', { level: 1 }).waitFor();
     await page.getByRole('heading', { name: 'Tests' }).waitFor();
     expect(await page.getByRole('list', { name: 'Open flags' }).count()).toBe(0);
   });
