@@ -41,10 +41,11 @@ export const PlotLatest = ({ label }: { label: LatestLabel }) => (
     textAnchor={label.anchor}
     fill="var(--ink)"
     fontSize={13}
-    // Above its point it may lie on the line, so it gets a rim to stay readable.
-    {...(label.anchor === 'end'
-      ? { stroke: 'var(--paper)', strokeWidth: 3, strokeOpacity: 0.8, paintOrder: 'stroke' }
-      : {})}
+    // It may lie on a line or an edge, so it gets a rim to stay readable.
+    stroke="var(--paper)"
+    strokeWidth={3}
+    strokeOpacity={0.8}
+    paintOrder="stroke"
   >
     <tspan fontSize={15} fontWeight={700}>
       {label.strong}

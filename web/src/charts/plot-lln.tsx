@@ -29,6 +29,10 @@ export const PlotLln = ({ layout: { frame, x, y }, line }: PlotLlnProps) => {
         textAnchor={line.steady ? 'start' : 'end'}
         fontSize={13}
         fill="var(--heather)"
+        stroke="var(--paper)"
+        strokeWidth={3}
+        strokeOpacity={0.8}
+        paintOrder="stroke"
       >
         {line.label}
       </text>
