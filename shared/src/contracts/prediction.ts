@@ -67,11 +67,24 @@ export const pattern = z.object({
 
 export const grade = z.object({ rule: z.string(), measure: z.string(), bandId: z.string(), label: z.string() });
 
+/** Half-open, from included and to excluded, unless `toInclusive`; null is without limit. */
+export const band = z.object({
+  id: z.string(),
+  label: z.string(),
+  quantity: z.enum(['percent-predicted', 'z', 'value']),
+  from: number,
+  to: number,
+  toInclusive: z.boolean().optional(),
+  colorStep: z.int().nullable().optional(),
+});
+
 export const predictionResponse = z.object({
   referenceSet: z.string(),
   measures: z.record(z.string(), predictedMeasure),
   pattern: pattern.nullable().optional(),
   grades: z.array(grade).optional(),
+  /** Bands of the rule that grades each value given. */
+  bands: z.record(z.string(), z.array(band)).optional(),
   notes: z.array(z.string()),
 });
 

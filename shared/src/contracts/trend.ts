@@ -2,7 +2,7 @@ import { z } from 'zod';
 import { isMeasureId, type MeasureId } from '../measures/registry';
 import { ratioRules } from './clinic';
 import { calendarDate, instantOut, uuid } from './common';
-import { gradingRuleIds, pattern, referenceSetIds } from './prediction';
+import { band, gradingRuleIds, pattern, referenceSetIds } from './prediction';
 import { bronchodilatorStates } from './spirometry-test';
 
 export const trendQuery = z.strictObject({
@@ -30,15 +30,7 @@ export const trendQuery = z.strictObject({
 
 const number = z.number().nullable();
 
-export const trendBand = z.object({
-  id: z.string(),
-  label: z.string(),
-  quantity: z.enum(['percent-predicted', 'z', 'value']),
-  from: number,
-  to: number,
-  toInclusive: z.boolean().optional(),
-  colorStep: z.int().nullable().optional(),
-});
+export { band as trendBand };
 
 export const trendPoint = z.object({
   takenAt: instantOut,
@@ -91,7 +83,7 @@ export const trendSeries = z.object({
   referenceSet: z.string().nullable(),
   gradingRule: z.string().nullable(),
   state: z.enum(bronchodilatorStates).nullable(),
-  bands: z.array(trendBand),
+  bands: z.array(band),
   points: z.array(trendPoint),
   baseline: trendPoint.nullable(),
   latest: trendPoint.nullable(),
@@ -127,6 +119,6 @@ export type TrendQuery = z.infer<typeof trendQuery>;
 export type TrendResponse = z.infer<typeof trendResponse>;
 export type TrendSeries = z.infer<typeof trendSeries>;
 export type TrendPoint = z.infer<typeof trendPoint>;
-export type TrendBand = z.infer<typeof trendBand>;
+export type TrendBand = z.infer<typeof band>;
 export type TrendPattern = z.infer<typeof trendPattern>;
 export type Verdict = (typeof verdicts)[number];

@@ -1,4 +1,6 @@
 import { getMeasure, type GradingRuleId, type MeasureId } from '@slighthill/shared/measures';
+import { bandsOf } from '../grading/bands-of';
+import type { GradingRule } from '../grading/types';
 import { findGradingRule, gradingRuleFor } from '../grading/index';
 import { assess } from '../reference-sets/assess';
 import { getReferenceSet, referenceSetFor } from '../reference-sets/index';
@@ -42,6 +44,7 @@ export function predictionResponse(request: PredictionRequest, clinic: Predictio
       measures: withoutSides(judged),
       pattern: pattern && { ...pattern, spirometryTestId: null, tlcMeasurementId: null },
       grades: gradesOf(judged, pattern, ruleOf),
+      bands: bandsOfValues(judged, ruleOf),
       notes: predictionNotes(request, judged, pattern),
     },
   };
@@ -99,4 +102,15 @@ function withoutSides(judged: JudgedMeasures): PredictionResponse['measures'] {
   return Object.fromEntries(
     Object.entries(judged).map(([id, { belowLln: _below, aboveUln: _above, ...measure }]) => [id, measure]),
   );
+}
+
+function bandsOfValues(
+  judged: JudgedMeasures,
+  ruleOf: (measure: MeasureId) => GradingRule | null,
+): PredictionResponse['bands'] {
+  const graded = (Object.keys(judged) as MeasureId[]).flatMap((id) => {
+    const rule = judged[id]?.value == null ? null : ruleOf(id);
+    return rule ? [[id, bandsOf(rule)] as const] : [];
+  });
+  return Object.fromEntries(graded);
 }

@@ -1,4 +1,5 @@
 import type { GradingRuleId, MeasureId } from '@slighthill/shared/measures';
+import type { QuantifiedBand } from '../grading/bands-of';
 import type { ClinicSeverityRules } from '../grading/index';
 import type { BronchodilatorState, JudgedPattern } from '../pattern/judge-pattern';
 import type { RatioRule } from '../pattern/pattern-words';
@@ -50,6 +51,8 @@ export interface PredictionResponse {
   measures: Partial<Record<MeasureId, PredictedMeasure>>;
   pattern: (JudgedPattern & { spirometryTestId: null; tlcMeasurementId: null }) | null;
   grades: Grade[];
+  /** Of every value given that has a grading rule. */
+  bands: Partial<Record<MeasureId, readonly QuantifiedBand[]>>;
   notes: string[];
 }
 

@@ -1,6 +1,6 @@
 import { getMeasure, type MeasureId } from '@slighthill/shared/measures';
 import { gradingRuleFor } from '../grading/index';
-import type { Band, GradingRule } from '../grading/types';
+import { bandsOf } from '../grading/bands-of';
 import type { Window } from './baseline-and-latest';
 import { changeOf } from './change-of';
 import { chooseComparable } from './comparable';
@@ -70,14 +70,4 @@ export function computeSeries(
       ...(rateNote && points.length > 0 ? [rateNote] : []),
     ],
   };
-}
-
-const known = new Map<GradingRule, TrendSeries['bands']>();
-
-function bandsOf(rule: GradingRule): TrendSeries['bands'] {
-  const found = known.get(rule);
-  if (found) return found;
-  const bands = rule.bands.map((band: Band) => ({ ...band, quantity: rule.quantity }));
-  known.set(rule, bands);
-  return bands;
 }

@@ -1,8 +1,9 @@
 import type { ReactNode } from 'react';
+import { edgesOf, type BandEdge } from '@slighthill/shared/format';
+import { limitWords } from '../../../charts/band-strips';
 import { capitalize, gradingRuleLabel } from '../../../charts/rule-words';
 import { VisuallyHidden } from '../../../ui/visually-hidden';
 import { derivedRows, type DerivedSet } from './derived-rows';
-import { bandLimitWords, fev1PercentEdges } from './fev1-bands';
 import { ZStrip, ZStripScale } from './z-strip';
 
 interface DerivedPanelProps {
@@ -21,9 +22,8 @@ const Verdict = ({ sets, severityRule }: Pick<DerivedPanelProps, 'sets' | 'sever
   const { severity } = pattern;
   // A heading that speaks of the two ratio rules is shown whole; else its band follows by itself.
   const rulesDiffer = pattern.lowByFixedRatio !== pattern.lowByLln;
-  const fev1 = prediction.measures.fev1;
-  const value = severity?.rule === 'ers-ats-2021' ? fev1?.z : fev1?.percentPredicted;
-  const limits = severity && value != null ? bandLimitWords(severity.rule, value) : null;
+  const band = severity && prediction.bands?.[severity.measure]?.find(({ id }) => id === severity.bandId);
+  const limits = band ? limitWords(band, false) : null;
   return (
     <>
       <span className="font-semibold">{severity && !rulesDiffer ? pattern.label : pattern.heading}</span>
@@ -39,6 +39,12 @@ const Verdict = ({ sets, severityRule }: Pick<DerivedPanelProps, 'sets' | 'sever
       {!severity && <span className="text-note text-ink-soft">{`No band by ${gradingRuleLabel(severityRule)}`}</span>}
     </>
   );
+};
+
+/** Edges that rounding of the FEV1's percent predicted must not cross (rule 0.4). */
+const percentEdges = (sets: DerivedPanelProps['sets']): BandEdge[] => {
+  const bands = sets.findLast((set) => set.prediction)?.prediction?.bands?.fev1 ?? [];
+  return edgesOf(bands.filter(({ quantity }) => quantity === 'percent-predicted'));
 };
 
 const head = 'pb-1 pl-2 text-right text-head text-ink-soft row:pl-3 row:whitespace-nowrap';
@@ -82,7 +88,7 @@ export const DerivedPanel = ({ sets, severityRule, updating, children }: Derived
         </tr>
       </thead>
       <tbody>
-        {derivedRows(sets, fev1PercentEdges(severityRule)).map((row) => (
+        {derivedRows(sets, percentEdges(sets)).map((row) => (
           <tr key={row.id} className="h-9 border-b border-rule">
             <th scope="row" className="text-left font-normal whitespace-nowrap">
               {row.label}

@@ -140,5 +140,12 @@ export const prediction: PredictionResponse = {
     notes: [],
   },
   grades: [],
+  // two neighbors of the rule are enough for the words of one
+  bands: {
+    fev1: [
+      { id: 'moderate', label: 'moderate', quantity: 'percent-predicted', from: 60, to: 70, colorStep: 2 },
+      { id: 'severe', label: 'severe', quantity: 'percent-predicted', from: 35, to: 50, colorStep: 4 },
+    ],
+  },
   notes: [],
 };
