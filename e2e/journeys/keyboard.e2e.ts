@@ -92,7 +92,10 @@ describe('by keyboard alone', () => {
     await drawer.getByLabel('COPD Assessment Test').waitFor();
     await page.keyboard.type('17');
     await page.keyboard.press('Enter');
-    await page.getByRole('status').getByText(/CAT 17\b.* is in Tests/).waitFor();
+    await page
+      .getByRole('status')
+      .getByText(/CAT 17\b.* is in Tests/)
+      .waitFor();
     expect(await drawer.count()).toBe(0);
     await focusIsBackOn(page, 'Record');
   });
