@@ -3,7 +3,7 @@ import path from 'node:path';
 import { aptInstall } from '../lib/apt-install';
 import { UserError } from '../lib/user-error';
 
-const names = ['chromium', 'chromium-browser', 'google-chrome', 'google-chrome-stable'];
+const names = ['chromium', 'chromium-browser'];
 
 function findChromium(): string | null {
   const own = process.env.CHROMIUM_PATH;
