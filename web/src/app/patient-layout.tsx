@@ -21,7 +21,7 @@ const CallUs = () => {
   return (
     <a
       href={`tel:${clinic.phone.replace(/[^+\d]/g, '')}`}
-      className="link flex min-h-12 items-center gap-2 text-p-label"
+      className="link flex min-h-12 shrink-0 items-center gap-2 text-p-label whitespace-nowrap"
     >
       <Icon name="phone" size={22} />
       {translate('home.call-us')}

@@ -50,7 +50,7 @@ export const SmallTrend = ({ series, onChoose }: SmallTrendProps) => {
         viewBox="0 0 248 66"
         width={248}
         height={66}
-        className="my-2 block max-w-full print:my-0 font-sans"
+        className="my-2 block max-w-full font-sans print:my-0 print:h-auto"
       >
         {layout && <SmallTrendPlot layout={layout} width={size.width} />}
         {last && (

@@ -77,7 +77,7 @@ export const TrendChart = ({ series, view, patternAbnormal, course, onOpenPoint 
       <p role="status" className="sr-only">
         {described && announces ? described.spoken : ''}
       </p>
-      <figcaption className="mt-2.5 flex flex-wrap items-baseline justify-between gap-x-6 gap-y-1">
+      <figcaption className="mt-2.5 print:mt-0 flex flex-wrap items-baseline justify-between gap-x-6 gap-y-1">
         <TrendLegend points={marks.map((mark) => mark.point)} difference={inLegend ? bracket.size : null} />
         <span id={hintId} data-print="hide" className="text-note text-ink-soft">
           {read ? `Point ${marks.indexOf(read) + 1} of ${marks.length}. ` : `${count}. `}

@@ -2,8 +2,8 @@ import { useParentSize } from '@visx/responsive';
 import { useEffect, useState } from 'react';
 import { flushSync } from 'react-dom';
 
-/** A little more than the text column of a printed page, so that the bands keep their limits on paper. */
-const printedPx = 700;
+/** About the text column of a printed page at the scale a summary prints in. */
+const printedPx = 870;
 
 const usePrinting = (): boolean => {
   const [printing, setPrinting] = useState(false);

@@ -34,7 +34,7 @@ export const AlsoOnRecord = ({ series, onChoose }: AlsoOnRecordProps) => {
   return (
     <section aria-label="Also on record" className="mt-6 border-t border-line pt-4 print:mt-3 print:pt-2">
       <h2 className="text-chart">Also on record</h2>
-      <ul className="mt-2 grid gap-x-6 row:grid-cols-2 print:grid-cols-2">
+      <ul className="mt-2 grid gap-x-6 row:grid-cols-2 print:mt-0 print:grid-cols-3">
         {series.map((one) => (
           <li key={one.measure} className="border-b border-row" data-print="together">
             <button
@@ -42,7 +42,7 @@ export const AlsoOnRecord = ({ series, onChoose }: AlsoOnRecordProps) => {
               onClick={() => onChoose(one.measure)}
               className="flex min-h-9 w-full flex-wrap items-baseline gap-x-3 rounded-control py-1 text-left transition-colors duration-120 hover:bg-mist print:min-h-0"
             >
-              <span className="min-w-24 font-semibold">
+              <span className="min-w-24 font-semibold print:min-w-0">
                 {isMeasureId(one.measure) ? getMeasure(one.measure).shortLabel : one.measure}
               </span>
               <span className="grow">{resultWords(one)}</span>

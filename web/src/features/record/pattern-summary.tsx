@@ -20,7 +20,7 @@ export const PatternSummary = ({ trends, view }: PatternSummaryProps) => {
   return (
     <section
       aria-label="Pattern"
-      className="grid gap-x-6 gap-y-2 margin:grid-cols-[264px_minmax(0,1fr)] print:grid-cols-[200px_minmax(0,1fr)]"
+      className="grid gap-x-6 gap-y-2 margin:grid-cols-[264px_minmax(0,1fr)] print:grid-cols-[180px_minmax(0,1fr)]"
     >
       <h2 className="text-record">{pattern?.heading ?? 'No pattern yet'}</h2>
       <div>

@@ -31,7 +31,7 @@ export const SinceBaseline = ({ all, current, onChoose }: SinceBaselineProps) =>
             <h2 className="text-chart">{date ? `Since baseline, ${date}` : 'Since baseline'}</h2>
             <p className="text-note text-ink-soft">Shaded: change too small to count</p>
           </div>
-          <ul className="mt-3 print:mt-1 grid grid-cols-[repeat(auto-fill,minmax(248px,1fr))] gap-x-6 gap-y-5 print:grid-cols-4 print:gap-x-3">
+          <ul className="mt-3 print:mt-1 grid grid-cols-[repeat(auto-fill,minmax(248px,1fr))] gap-x-6 gap-y-5 print:grid-cols-4 print:gap-x-3 print:gap-y-2">
             {changed.map((series) => (
               <li key={series.measure} data-print="together">
                 <SmallTrend series={series} onChoose={() => onChoose(series.measure)} />

@@ -29,7 +29,7 @@ export const Component = () => {
 
   return (
     <>
-      <PageHeader title="File" />
+      <PageHeader level={2} title="File" />
       <div className="mt-3 flex flex-col gap-6">
         {query.isPending && <SkeletonRows label="Loading the file" rows={6} bars={[14, 50, 14]} />}
         {query.error && (
@@ -40,9 +40,9 @@ export const Component = () => {
         {patient &&
           groups.map(({ kind, items }) => (
             <section key={kind} aria-labelledby={`file-${kind}`}>
-              <h2 id={`file-${kind}`} className="mb-2 text-chart">
+              <h3 id={`file-${kind}`} className="mb-2 text-chart">
                 {kindLabel(kind)}
-              </h2>
+              </h3>
               <ul>
                 {items.map((entry) => (
                   <FileRow key={entry.id} patient={patient} entry={entry} />

@@ -25,6 +25,7 @@ export const Component = () => {
   return (
     <>
       <PageHeader
+        level={2}
         title="Tests"
         note={query.isSuccess && tests.length > 0 && countWords(tests.length, query.hasNextPage)}
       />

@@ -91,7 +91,7 @@ describe('the File section', () => {
     const sent = plan('POST /api/file-entries/:id/release', { entry: hold });
     const { user } = renderRecord(<FilePage />, '/patients/:patientId/file', `/patients/${ruth.id}/file`);
     await screen.findByRole('heading', { name: 'Safety hold' });
-    expect(screen.getAllByRole('heading', { level: 2 }).map((heading) => heading.textContent)).toEqual([
+    expect(screen.getAllByRole('heading', { level: 3 }).map((heading) => heading.textContent)).toEqual([
       'Safety hold',
       'Smoking',
     ]);

@@ -47,6 +47,7 @@ export const TestDetailView = ({ detail, actions }: TestDetailViewProps) => {
   return (
     <article className="flex flex-col gap-6">
       <PageHeader
+        level={2}
         title={name}
         note={`Entered by ${recordedBy.displayName}, ${formatInstant(recordedAt, timeZone)}`}
         actions={actions}
@@ -57,15 +58,15 @@ export const TestDetailView = ({ detail, actions }: TestDetailViewProps) => {
       </div>
       {detail.kind === 'spirometry-test' && detail.test.maneuvers.length > 0 && (
         <section>
-          <h2 className="mb-2 text-section">Maneuvers</h2>
+          <h3 className="mb-2 text-section">Maneuvers</h3>
           <ManeuverTable maneuvers={detail.test.maneuvers} />
           <p className="mt-2 text-note text-ink-soft">Quality is not graded yet.</p>
         </section>
       )}
       <section aria-labelledby="test-history">
-        <h2 id="test-history" className="mb-1 text-section">
+        <h3 id="test-history" className="mb-1 text-section">
           History
-        </h2>
+        </h3>
         <HistoryList history={detail.history} factsOf={inWords} now={inWords(contentOf(detail))} />
       </section>
     </article>
