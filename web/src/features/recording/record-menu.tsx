@@ -69,10 +69,10 @@ export const RecordMenu = ({ patient }: RecordMenuProps) => {
   const Drawer = open ? drawers[open] : null;
 
   return (
-    <div className="flex flex-wrap items-center justify-end gap-x-3 gap-y-1">
+    <div className="flex flex-wrap items-center justify-end gap-y-1">
       <p role="status" className="text-note">
         {saved && (
-          <span className="flex items-center gap-2 text-fern">
+          <span className="mr-3 flex items-center gap-2 text-fern">
             <Icon name="check" size={18} />
             <span>
               {`Saved. ${saved.words}.`}{' '}
