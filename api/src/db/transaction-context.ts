@@ -16,4 +16,12 @@ export function useTransactionContext(): void {
   } as never);
 }
 
-export const insideTransaction = (): boolean => storage.getStore()?.get('transaction') !== undefined;
+interface OpenTransaction {
+  connection: { query(text: string, values: unknown[]): Promise<{ rows: unknown[] }> };
+}
+
+/** The open transaction, for the one reader that goes round the ORM. */
+export const currentTransaction = (): OpenTransaction | undefined =>
+  storage.getStore()?.get('transaction') as OpenTransaction | undefined;
+
+export const insideTransaction = (): boolean => currentTransaction() !== undefined;

@@ -45,17 +45,24 @@ function bodyParserType(thrown: unknown): string | null {
   return typeof type === 'string' && /^(entity|encoding|charset|request|parameters)\./.test(type) ? type : null;
 }
 
+interface DriverError {
+  code?: unknown;
+  message?: unknown;
+}
+
 /** PostgreSQL going down in the middle of a query: class 57P or a dropped socket. */
 function isConnectionLoss(thrown: unknown): boolean {
-  const parent = (thrown as { parent?: { code?: unknown; message?: unknown } } | null)?.parent;
-  const code = String(parent?.code ?? '');
-  return /^57P/.test(code) || code === 'ECONNRESET' || /Connection terminated/.test(String(parent?.message ?? ''));
+  // the ORM wraps the driver's error; the bare reader does not
+  const error = thrown as { parent?: DriverError } & DriverError;
+  const { code = '', message = '' } = error?.parent ?? error ?? {};
+  return /^57P/.test(String(code)) || code === 'ECONNRESET' || /Connection terminated/.test(String(message));
 }
 
 /** Database errors carry the statement's values; the log must not. */
 function safeError(thrown: unknown): { name: string; message: string; code?: unknown; stack?: string } {
   if (!(thrown instanceof Error)) return { name: 'unknown', message: 'a value that is not an error was thrown' };
-  const code = (thrown as { parent?: { code?: unknown } }).parent?.code;
+  const { parent, code: own } = thrown as { parent?: DriverError } & DriverError;
+  const code = parent?.code ?? own;
   const message = code === undefined ? thrown.message : `database error ${String(code)}`;
   const stack = thrown.stack
     ?.split('\n')

@@ -1,11 +1,12 @@
 import { fromStored, isMeasureId, type MeasureId } from '@slighthill/shared/measures';
 import type { DiagnosisGroup, EnrollmentStatus, SexForPrediction } from '@slighthill/shared/contracts/patient';
-import { selectRow, selectRows } from '../db/query';
+import { readRows } from '../db/read-rows';
 import { notFound } from '../errors/app-error';
 import type { TrendEnrollment, TrendMeasurement, TrendPerson } from '../physiology/trends/types';
 
 /** All that a patient's trends are computed from. */
 export interface TrendSource {
+  patient: { id: string; clinicId: string };
   person: TrendPerson;
   enrollments: TrendEnrollment[];
   exacerbationOnsets: string[];
@@ -18,7 +19,7 @@ interface TrendReader {
 }
 
 export const trendPersonSql = /* sql */ `
-  select p.birth_date::text as "birthDate", p.sex_for_prediction as "sexForPrediction",
+  select p.id, p.clinic_id as "clinicId", p.birth_date::text as "birthDate", p.sex_for_prediction as "sexForPrediction",
     p.diagnosis_group as "diagnosisGroup",
     coalesce((select f.details ->> 'confirmedBy' is not null from file_entries f
       where f.patient_id = p.id and f.kind = 'diagnosis' and f.voided_at is null
@@ -44,6 +45,8 @@ export const trendMeasurementsSql = /* sql */ `
   order by taken_at, id`;
 
 interface PersonRow {
+  id: string;
+  clinicId: string;
   birthDate: string;
   sexForPrediction: SexForPrediction;
   diagnosisGroup: DiagnosisGroup;
@@ -64,16 +67,22 @@ export async function trendSource(
   measures: readonly MeasureId[] | null = null,
 ): Promise<TrendSource> {
   const bind = { patientId, clinicId: reader.clinicId };
-  const person = await selectRow<PersonRow>(trendPersonSql, bind);
+  const person = (await readRows<PersonRow>(trendPersonSql, bind))[0];
   if (!person) throw notFound('This patient');
   const wanted = measures && [...new Set([...measures, ...patternMeasures])];
-  const rows = await selectRows<MeasurementRow>(trendMeasurementsSql, {
+  const rows = await readRows<MeasurementRow>(trendMeasurementsSql, {
     ...bind,
     timeZone: reader.clinic.timeZone,
     measures: wanted,
   });
-  const { enrollments, exacerbationOnsets, ...who } = person;
-  return { person: who, enrollments, exacerbationOnsets, measurements: toDisplayUnits(rows) };
+  const { id, clinicId, enrollments, exacerbationOnsets, ...who } = person;
+  return {
+    patient: { id, clinicId },
+    person: who,
+    enrollments,
+    exacerbationOnsets,
+    measurements: toDisplayUnits(rows),
+  };
 }
 
 /** Rows of measures the registry no longer knows are left out; values come in the storage unit. */

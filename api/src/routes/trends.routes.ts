@@ -4,7 +4,6 @@ import { trendQuery, trendResponse } from '@slighthill/shared/contracts/trend';
 import { measures, type MeasureId } from '@slighthill/shared/measures';
 import { invalidInput } from '../errors/app-error';
 import { defineRoute, type Route } from '../http/define-route';
-import { loadPatient } from '../http/load';
 import { checkGroup } from '../physiology/prediction/check-group';
 import { predictionResponse as predict } from '../physiology/prediction/prediction-response';
 import { computeTrends } from '../physiology/trends/compute-trends';
@@ -41,8 +40,9 @@ export const trendsRoutes: Route[] = [
     handler: async ({ context, params, query }) => {
       const groupError = checkGroup(query.referenceSet, query.group);
       if (groupError) throw invalidInput(groupError);
-      const patient = await loadPatient(context, params.id, 'trends:read');
-      const source = await trendSource(context.actor, patient.id, query.measures);
+      const source = await trendSource(context.actor, params.id, query.measures);
+      const patient = context.authorizeRow('trends:read', source.patient, 'This patient');
+      context.audit.showsPatients(patient.id);
       if (query.enrollment && !source.enrollments.some(({ id }) => id === query.enrollment))
         throw invalidInput({ path: 'enrollment', message: 'This patient has no such enrollment' });
       const asked = query.measures ?? presentMeasures(source.measurements);
