@@ -41,7 +41,6 @@ export const trendPoint = z.object({
   z: number,
   zApproximate: number.optional(),
   lln: number,
-  uln: number,
   band: z.string().nullable(),
   bandLabel: z.string().nullable(),
   graded: z.boolean(),
@@ -52,8 +51,8 @@ export const trendPoint = z.object({
   reason: z.string().optional(),
   heightCm: number,
   heightMethod: z.string().nullable(),
-  heightCarried: z.boolean(),
-  weightKg: number,
+  /** Present when the height is that of an earlier visit. */
+  heightCarried: z.literal(true).optional(),
   ageYears: z.number(),
   conditions: z.record(z.string(), z.unknown()),
   sourceKind: z.string(),

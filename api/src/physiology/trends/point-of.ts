@@ -68,7 +68,6 @@ export function pointOf(result: TrendMeasurement, evaluation: Evaluation, contex
     percentPredicted: assessed?.percentPredicted ?? null,
     z: assessed?.z ?? null,
     lln: prediction?.lln ?? null,
-    uln: prediction?.uln ?? null,
     band: band?.id ?? null,
     bandLabel,
     graded,
@@ -78,14 +77,13 @@ export function pointOf(result: TrendMeasurement, evaluation: Evaluation, contex
     role: result === pair.baseline ? 'baseline' : result === pair.latest ? 'latest' : null,
     heightCm: result.heightCm,
     heightMethod: result.heightMethod,
-    heightCarried: result.heightCarried,
-    weightKg: result.weightKg,
     ageYears,
     conditions: result.conditions,
     sourceKind: result.sourceKind,
     sourceId: result.sourceId,
   };
   if (assessed?.zApproximate != null) point.zApproximate = assessed.zApproximate;
+  if (result.heightCarried) point.heightCarried = true;
   if (reason !== null) point.reason = reason;
   return point;
 }

@@ -78,7 +78,6 @@ export interface TrendPoint {
   z: number | null;
   zApproximate?: number;
   lln: number | null;
-  uln: number | null;
   band: string | null;
   bandLabel: string | null;
   graded: boolean;
@@ -90,8 +89,8 @@ export interface TrendPoint {
   reason?: string;
   heightCm: number | null;
   heightMethod: string | null;
-  heightCarried: boolean;
-  weightKg: number | null;
+  /** Present when the height is that of an earlier visit. */
+  heightCarried?: true;
   ageYears: number;
   conditions: Readonly<Record<string, unknown>>;
   sourceKind: string;
