@@ -1,8 +1,8 @@
+import { bronchodilatorResponse } from '@slighthill/shared/bronchodilator-response';
 import { formatNumber } from '@slighthill/shared/format';
 import { referenceSetLabel } from '../../../charts/rule-words';
 import { formatDayMonth } from '../../../lib/clinic-time';
 import type { Earlier } from '../forms/number-questions';
-import { bronchodilatorResponse } from './bronchodilator-response';
 import type { DerivedSet } from './derived-rows';
 
 /** What the predictions rest on: "GLI Global 2022, age 65.4, 165.0 cm from Aug 24." */

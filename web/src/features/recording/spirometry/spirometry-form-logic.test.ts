@@ -1,6 +1,5 @@
 import { describe, expect, it } from 'vitest';
 import { bestPreview, rowRatio } from './best-preview';
-import { bronchodilatorResponse } from './bronchodilator-response';
 import { emptyRow, emptySet, emptySpirometryForm, type BlowRow, type SpirometryForm } from './spirometry-form';
 import { spirometryQuestions, type SpirometryEarlier } from './spirometry-questions';
 import { checkSpirometry } from './spirometry-request';
@@ -65,27 +64,6 @@ describe('bestPreview', () => {
   it('reads a comma as a decimal sign', () => {
     expect(rowRatio('1,44', '2,40')).toBeCloseTo(0.6, 9);
     expect(rowRatio('2.5', '2.4')).toBeNull();
-  });
-});
-
-describe('bronchodilatorResponse', () => {
-  // Rule GR-10, table of the rule book: before, after, predicted, percent of predicted, response (ERS/ATS 2021).
-  it.each([
-    [2.0, 2.4, 3.2, 12.5, true],
-    [1.2, 1.36, 2.9, 5.52, false],
-    [0.8, 0.98, 2.6, 6.92, false],
-    [1.5, 1.7, 2.0, 10.0, false],
-    [1.5, 1.68, 3.0, 6.0, false],
-    [2.0, 2.3, 3.0, 10.0, false],
-  ])('%f to %f L of %f L predicted', (before, after, predicted, percent, isResponse) => {
-    const found = bronchodilatorResponse(before, after, predicted);
-    expect(found?.percent).toBeCloseTo(percent, 2);
-    expect(found?.isResponse).toBe(isResponse);
-  });
-
-  it('needs all three numbers', () => {
-    expect(bronchodilatorResponse(1, null, 3)).toBeNull();
-    expect(bronchodilatorResponse(1, 2, null)).toBeNull();
   });
 });
 
