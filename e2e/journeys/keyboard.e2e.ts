@@ -50,6 +50,7 @@ describe('by keyboard alone', () => {
     await page.getByRole('heading', { level: 1, name: showcasePatient.name }).waitFor();
 
     await tabTo(page, 'application');
+    await page.getByText(/^\d+ points\./).waitFor();
     const marks = await page.getByRole('application').locator('[data-mark]').count();
     await page.keyboard.press('End');
     await page.getByText(`Point ${marks} of ${marks}.`).waitFor();

@@ -2,6 +2,7 @@ import type { Page } from 'playwright-core';
 import { describe, expect } from 'vitest';
 import { expectAxeClean } from '../fixtures/axe';
 import { clinicDay, writtenDay } from '../fixtures/clinic-day';
+import { addPatient as addKnownPatient } from '../fixtures/in-page';
 import { inventPerson } from '../fixtures/invented-person';
 import { picture } from '../fixtures/picture';
 import {
@@ -42,10 +43,19 @@ const secondAfter: Blow[] = [
 
 async function addPatient(page: Page, width: number): Promise<void> {
   const person = inventPerson();
+  await addKnownPatient(page, person);
   await page.getByRole('link', { name: 'New patient' }).click();
   await fillNewPatient(page, person);
+  // Someone of this name and birth date is known: asked once, and never in the way of saving.
+  const drawer = dialog(page, 'New patient');
+  const question = drawer.getByText(new RegExp(`^Is this ${person.givenName} ${person.familyName}, born`));
+  await question.waitFor();
+  if (width === 1280) await picture(page, 'patient-new-duplicate');
+  await drawer.getByRole('button', { name: 'Someone else' }).click();
+  await drawer.getByLabel('Phone').fill('720-555-0199');
+  expect(await question.count()).toBe(0);
   if (width === 1280) await picture(page, 'patient-new-filled');
-  await dialog(page, 'New patient').getByRole('button', { name: 'Save patient' }).click();
+  await drawer.getByRole('button', { name: 'Save patient' }).click();
   await page.getByRole('heading', { level: 1, name: `${person.givenName} ${person.familyName}` }).waitFor();
 }
 
@@ -120,6 +130,7 @@ async function readTrend(page: Page): Promise<void> {
 /** What the reader announces at each point, from the first to the last. */
 async function readPoints(page: Page): Promise<string[]> {
   const chart = page.getByRole('application');
+  await page.getByText(/^\d+ points\./).waitFor();
   const marks = await chart.locator('[data-mark]').count();
   const announced: string[] = [];
   await chart.focus();
@@ -148,6 +159,7 @@ async function chartAndTwin(page: Page): Promise<void> {
     .getByRole('region', { name: 'Trend' })
     .getByRole('row')
     .filter({ has: page.getByRole('link') });
+  await rows.nth(announced.length - 1).waitFor();
   expect(await rows.count()).toBe(announced.length);
   for (const [index, words] of announced.entries()) {
     const [, value, percent] = /FEV1 (\d\.\d\d L), (\d+%)/.exec(words) ?? [];
