@@ -3,13 +3,13 @@ import { createApp } from './app';
 import { warmPasswords } from './auth/passwords';
 import { readEnv } from './config/env';
 import { connectDatabase } from './db/connect';
-import { User } from './models/user';
+import { deleteExpiredLimits } from './http/rate-limit-store';
+import { Clinic } from './models/clinic';
 import { summariesSettled } from './services/follow-in-background';
 import { deleteExpiredDrafts } from './services/save-draft';
 import { systemClock } from './time/system-clock';
 
 const sweepMs = 15 * 60_000;
-const demoEmails = ['coordinator@alderfalls.test', 'coordinator@stonebridge.test', 'admin@alderfalls.test'];
 
 async function main(): Promise<void> {
   const env = readEnv();
@@ -31,9 +31,12 @@ async function main(): Promise<void> {
   });
 
   const sweep = setInterval(() => {
-    Promise.all([sessions.deleteExpired(), deleteExpiredDrafts(systemClock.now())]).catch((error: unknown) => {
-      logger.warn({ name: (error as Error).name }, 'the sweep of expired sessions and drafts failed');
-    });
+    const now = systemClock.now();
+    Promise.all([sessions.deleteExpired(), deleteExpiredDrafts(now), deleteExpiredLimits(now)]).catch(
+      (error: unknown) => {
+        logger.warn({ name: (error as Error).name }, 'the sweep of what has expired failed');
+      },
+    );
   }, sweepMs);
   sweep.unref();
 
@@ -59,8 +62,8 @@ async function main(): Promise<void> {
 
 /** A real clinic must not run with accounts whose password is printed in the README. */
 async function refuseDemoAccounts(): Promise<void> {
-  const found = await User.findOne({ where: { email: demoEmails }, attributes: ['id'] });
-  if (found) throw new Error('This database holds the demo accounts. Production does not start with them.');
+  if ((await Clinic.count({ where: { demo: true } })) > 0)
+    throw new Error('This database holds the demo accounts. Production does not start with them.');
 }
 
 main().catch((error: unknown) => {

@@ -36,6 +36,7 @@ export async function writeAuditEvent(entry: AuditEntry, at: Date): Promise<void
 export class AuditTrail {
   private readonly patientIds = new Set<string>();
   private entity: { kind: string; id: string } | undefined;
+  private detail: Record<string, unknown> = {};
   private written = false;
   private readonly actor: Actor;
   private readonly action: string;
@@ -57,6 +58,11 @@ export class AuditTrail {
     this.entity = { kind, id };
   }
 
+  /** What the changed fields said before; never shown to an administrator. */
+  keepsBefore(values: Record<string, unknown>): void {
+    this.detail = { before: values };
+  }
+
   get isDue(): boolean {
     return !this.written && (this.patientIds.size > 0 || this.entity !== undefined);
   }
@@ -73,6 +79,7 @@ export class AuditTrail {
         outcome,
         patientIds: [...this.patientIds],
         address: this.address,
+        detail: this.detail,
         ...(this.entity ? { entity: this.entity } : {}),
       },
       this.now(),

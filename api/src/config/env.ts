@@ -19,7 +19,14 @@ export type Env = z.infer<typeof schema>;
 /** The only reader of process.env in the API. */
 export function readEnv(source: NodeJS.ProcessEnv = process.env): Env {
   const result = schema.safeParse(source);
-  if (result.success) return result.data;
+  if (result.success) return requireSecureCookies(result.data);
   const problems = result.error.issues.map((issue) => `${issue.path.join('.')}: ${issue.message}`).join('; ');
   throw new Error(`The environment is not complete: ${problems}`);
+}
+
+/** Beyond loopback, cookies must be Secure, which needs to know the public address. */
+function requireSecureCookies(env: Env): Env {
+  const isLoopback = /^127\.|^::1$|^localhost$/.test(env.HOST);
+  if (isLoopback || env.PUBLIC_ORIGIN?.startsWith('https://')) return env;
+  throw new Error(`HOST ${env.HOST} is not loopback: set PUBLIC_ORIGIN to the https address people use.`);
 }

@@ -55,7 +55,9 @@ function isConnectionLoss(thrown: unknown): boolean {
   // the ORM wraps the driver's error; the bare reader does not
   const error = thrown as { parent?: DriverError } & DriverError;
   const { code = '', message = '' } = error?.parent ?? error ?? {};
-  return /^57P/.test(String(code)) || code === 'ECONNRESET' || /Connection terminated/.test(String(message));
+  return (
+    /^57P|^40P01$|^40001$/.test(String(code)) || code === 'ECONNRESET' || /Connection terminated/.test(String(message))
+  );
 }
 
 /** Database errors carry the statement's values; the log must not. */

@@ -36,3 +36,8 @@ export class RateLimitStore implements Store {
     await execute('delete from rate_limits where key = $key', { key: this.prefix + key });
   }
 }
+
+/** Counters whose window has passed say nothing any more. */
+export async function deleteExpiredLimits(now: Date): Promise<void> {
+  await execute('delete from rate_limits where resets_at <= $now', { now });
+}

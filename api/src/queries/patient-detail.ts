@@ -48,9 +48,10 @@ const sql = /* sql */ `
     p.birth_date::text as "birthDate", p.sex_for_prediction as "sexForPrediction",
     p.diagnosis_group as "diagnosisGroup", p.record_number as "recordNumber", p.email, p.phone, p.version,
     p.created_at as "createdAt", p.created_by as "createdById", c.display_name as "createdByName",
-    coalesce((select f.details ->> 'confirmedBy' is not null from file_entries f
+    exists (select 1 from file_entries f
       where f.patient_id = p.id and f.kind = 'diagnosis' and f.voided_at is null
-      order by f.on_date desc, f.created_at desc, f.id desc limit 1), false) as "diagnosisConfirmed",
+        and f.details ->> 'diagnosisGroup' = p.diagnosis_group and f.details ->> 'confirmedBy' is not null)
+      as "diagnosisConfirmed",
     e.row as enrollment, s.pattern,
     (select json_build_object('on', f.on_date, 'details', f.details) from file_entries f
       where f.patient_id = p.id and f.kind = 'oxygen-order' and f.voided_at is null

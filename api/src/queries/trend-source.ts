@@ -21,9 +21,10 @@ interface TrendReader {
 export const trendPersonSql = /* sql */ `
   select p.id, p.clinic_id as "clinicId", p.birth_date::text as "birthDate", p.sex_for_prediction as "sexForPrediction",
     p.diagnosis_group as "diagnosisGroup",
-    coalesce((select f.details ->> 'confirmedBy' is not null from file_entries f
+    exists (select 1 from file_entries f
       where f.patient_id = p.id and f.kind = 'diagnosis' and f.voided_at is null
-      order by f.on_date desc, f.created_at desc, f.id desc limit 1), false) as "diagnosisConfirmed",
+        and f.details ->> 'diagnosisGroup' = p.diagnosis_group and f.details ->> 'confirmedBy' is not null)
+      as "diagnosisConfirmed",
     coalesce((select json_agg(json_build_object('id', e.id, 'status', e.status, 'startOn', e.start_on,
       'firstExerciseOn', e.first_exercise_on, 'lastSessionOn', e.last_session_on,
       'endOn', coalesce(e.ended_on, e.planned_end_on)) order by e.start_on, e.id)

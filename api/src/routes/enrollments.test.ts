@@ -1,6 +1,6 @@
 import type { EnrollmentStatus } from '@slighthill/shared/contracts/patient';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { selectRow } from '../db/query';
+import { selectRow, selectRows } from '../db/query';
 import { spirometryBody } from '../testing/factories/bodies';
 import { makeClinic, type TestClinic } from '../testing/factories/clinic';
 import { addEnrollment, addPatient, addSpirometry, newId } from '../testing/factories/scene';
@@ -177,5 +177,36 @@ describe('the states of an enrollment', () => {
     expect(await baselineOf('')).toBe('2026-02-20');
     expect(await baselineOf(`&enrollment=${first.id}`)).toBe('2025-02-20');
     expect((await trend(`&enrollment=${newId()}`)).errors[0].path).toBe('enrollment');
+  });
+});
+
+describe('changing an enrollment', () => {
+  it('says what it does not use, and corrects a wrong end date with a reason', async () => {
+    const patientId = await addPatient(own);
+    const { id } = await addEnrollment(own, patientId, { startOn: '2026-03-02' });
+    const patch = (body: object) => own.as.coordinator.patch(`/api/enrollments/${id}`, body);
+    const refusedAt = async (body: object) => {
+      const answer = await patch(body);
+      expect(answer.status).toBe(422);
+      return answer.body.errors.map((error: { path: string }) => error.path);
+    };
+    expect(await refusedAt({ version: 1, endedOn: '2026-05-01' })).toEqual(['endedOn']);
+    expect(await refusedAt({ version: 1, reason: 'no change' })).toEqual(['reason']);
+    expect(await refusedAt({ version: 1, consentOn: '2057-01-01' })).toEqual(['consentOn']);
+    await patch({ version: 1, status: 'active' }).expect(200);
+    await patch({ version: 2, status: 'completed', endedOn: '2026-05-20' }).expect(200);
+    expect(await refusedAt({ version: 3, endedOn: '2026-05-25' })).toEqual(['reason']);
+    const corrected = await patch({ version: 3, endedOn: '2026-05-25', reason: 'typed wrong' }).expect(200);
+    expect(corrected.body.enrollment).toMatchObject({ endedOn: '2026-05-25', status: 'completed' });
+  });
+
+  it('keeps what the changed fields said before in the audit event', async () => {
+    const patientId = await addPatient(own);
+    await own.as.coordinator.patch(`/api/patients/${patientId}`, { version: 1, birthDate: '1960-01-02' }).expect(200);
+    const [event] = await selectRows<{ detail: object }>(
+      `select detail from audit_events where action = 'patient.change' and $patientId::uuid = any (patient_ids)`,
+      { patientId },
+    );
+    expect(event?.detail).toEqual({ before: { birthDate: '1959-03-02' } });
   });
 });

@@ -6,12 +6,11 @@ import { Patient } from '../models/patient';
 import { presentBodySize } from '../presenters/body-size';
 import { findBodySize } from '../queries/body-sizes';
 import { checkInstant } from './check-instant';
+import { bringInLine } from './bring-in-line';
 import { runCommand, type CommandContext } from './command-context';
-import { keepRevision } from './keep-revision';
+import { keepRevision, requireChanges } from './keep-revision';
 import { lockEntryForChange } from './lock-for-change';
 import { writeBodySizeFacts } from './record-body-size';
-import { refreshCarriedHeights } from './refresh-carried-heights';
-import { refreshSummaries } from './refresh-summaries';
 
 /** Changes a height or weight with a reason. One that came with a test is amended there. */
 export async function amendBodySize(context: CommandContext, id: string, body: BodySizeAmendBody): Promise<void> {
@@ -24,6 +23,7 @@ export async function amendBodySize(context: CommandContext, id: string, body: B
     context.audit.about('body-size', row.id);
     const before = presentBodySize((await findBodySize(context.actor, id))!);
     const { version: _version, reason, ...changes } = body;
+    requireChanges(changes);
     const merged = validate(
       bodySizeCreate,
       {
@@ -41,7 +41,6 @@ export async function amendBodySize(context: CommandContext, id: string, body: B
     await keepRevision(context, 'body-size', row, before, reason);
     await writeBodySizeFacts(context, patient, { ...merged, kind: 'body-size', id: row.id, takenAt });
     await BodySize.update({ version: row.version + 1 }, { where: { id: row.id } });
-    await refreshCarriedHeights(context, patient);
-    await refreshSummaries(context, patient);
+    await bringInLine(context, patient);
   });
 }

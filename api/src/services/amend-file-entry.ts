@@ -8,7 +8,7 @@ import { presentFileEntry } from '../presenters/file-entry';
 import { findFileEntry } from '../queries/file-entries';
 import { checkDate } from './check-instant';
 import { runCommand, type CommandContext } from './command-context';
-import { keepRevision } from './keep-revision';
+import { keepRevision, requireChanges } from './keep-revision';
 import { lockEntryForChange } from './lock-for-change';
 import { checkDetails } from './record-file-entry';
 import { refreshDiagnosis } from './refresh-diagnosis';
@@ -24,19 +24,24 @@ export async function amendFileEntry(context: CommandContext, id: string, body: 
     context.audit.showsPatients(patient.id);
     context.audit.about('file-entry', row.id);
     const before = presentFileEntry((await findFileEntry(context.actor, id))!);
+    const { version: _version, reason, ...changes } = body;
+    requireChanges(changes);
     const on = body.on ?? row.onDate;
     const wrapped = z.object({ details: fileDetails[row.kind] });
     const { details } = validate(wrapped, { details: body.details ?? row.details }, 'body');
     checkDate(context, patient, on, 'on');
     checkDetails(context, row.kind, details, on);
-    await keepRevision(context, 'file-entry', row, before, body.reason);
+    await keepRevision(context, 'file-entry', row, before, reason);
     await row.update({
       onDate: on,
-      details: details as Record<string, unknown>,
+      details: { ...details, ...registrationMark(row) },
       ...(body.note === undefined ? {} : { note: body.note }),
       version: row.version + 1,
     });
-    await refreshDiagnosis(context, patient);
+    await refreshDiagnosis(patient);
     await refreshSummaries(context, patient);
   });
 }
+
+/** An amended registration entry stays one. */
+const registrationMark = (row: FileEntry) => (row.details.atRegistration === true ? { atRegistration: true } : {});

@@ -7,12 +7,10 @@ import { Patient } from '../models/patient';
 import { presentMeasurement } from '../presenters/measurement';
 import { findMeasurement } from '../queries/measurements';
 import { checkInstant } from './check-instant';
+import { bringInLine } from './bring-in-line';
 import { runCommand, type CommandContext } from './command-context';
-import { refreshCombinedMeasures } from './derived-facts';
-import { keepRevision } from './keep-revision';
+import { keepRevision, requireChanges } from './keep-revision';
 import { lockEntryForChange } from './lock-for-change';
-import { refreshCarriedHeights } from './refresh-carried-heights';
-import { refreshSummaries } from './refresh-summaries';
 import { writeMeasurementFacts } from './write-measurement-facts';
 
 /** Changes a single-value result with a reason; the earlier value is kept. */
@@ -26,6 +24,7 @@ export async function amendMeasurement(context: CommandContext, id: string, body
     context.audit.about('measurement', row.id);
     const before = presentMeasurement((await findMeasurement(context.actor, id))!);
     const { version: _version, reason, ...changes } = body;
+    requireChanges(changes);
     const merged = validate(
       measurementCreate,
       {
@@ -36,17 +35,17 @@ export async function amendMeasurement(context: CommandContext, id: string, body
         heightCm: before.heightCarried ? null : before.heightCm,
         heightMethod: before.heightMethod ?? undefined,
         weightKg: before.weightKg,
-        conditions: before.conditions,
         item9: before.item9,
         note: before.note,
         ...changes,
+        // a condition that is not named keeps its value
+        conditions: { ...before.conditions, ...changes.conditions },
       },
       'body',
     );
     const takenAt = new Date(merged.takenAt);
     checkInstant(context, patient, takenAt, 'takenAt');
     await keepRevision(context, 'measurement', row, before, reason);
-    const earlierAt = row.takenAt;
     await writeMeasurementFacts(context, patient, {
       ...merged,
       id: row.id,
@@ -54,10 +53,7 @@ export async function amendMeasurement(context: CommandContext, id: string, body
       conditions: withDefaultConditions(merged.measure, merged.conditions),
       safetyAnswer: merged.item9,
     });
-    if (earlierAt.getTime() !== takenAt.getTime())
-      await refreshCombinedMeasures(context, patient, merged.measure, [earlierAt]);
     await Measurement.update({ version: row.version + 1 }, { where: { id: row.id } });
-    await refreshCarriedHeights(context, patient);
-    await refreshSummaries(context, patient);
+    await bringInLine(context, patient);
   });
 }

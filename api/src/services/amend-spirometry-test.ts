@@ -5,11 +5,10 @@ import { SpirometryTest } from '../models/spirometry-test';
 import { presentSpirometryTest } from '../presenters/spirometry-test';
 import { findSpirometryTest } from '../queries/spirometry-tests';
 import { checkInstant } from './check-instant';
+import { bringInLine } from './bring-in-line';
 import { runCommand, type CommandContext } from './command-context';
-import { keepRevision } from './keep-revision';
+import { keepRevision, requireChanges } from './keep-revision';
 import { lockEntryForChange } from './lock-for-change';
-import { refreshCarriedHeights } from './refresh-carried-heights';
-import { refreshSummaries } from './refresh-summaries';
 import { spirometryColumns, writeSpirometryFacts } from './write-spirometry-facts';
 
 /** Changes a test with a reason; what it said before is kept, and everything that follows from it is brought in line. */
@@ -25,13 +24,13 @@ export async function amendSpirometryTest(
     context.audit.about('spirometry-test', row.id);
     const before = presentSpirometryTest((await findSpirometryTest(context.actor, id))!);
     const { version: _version, reason, ...changes } = body;
+    requireChanges(changes);
     const merged = validate(spirometryTestCreate, { ...editable(before), ...withEntry(changes) }, 'body');
     checkInstant(context, patient, new Date(merged.performedAt), 'performedAt');
     await keepRevision(context, 'spirometry-test', row, before, reason);
     await row.update({ ...spirometryColumns(merged), version: row.version + 1 });
     await writeSpirometryFacts(context, patient, row, merged.maneuvers);
-    await refreshCarriedHeights(context, patient);
-    await refreshSummaries(context, patient);
+    await bringInLine(context, patient);
   });
 }
 

@@ -37,7 +37,7 @@ export async function createPatient(context: CommandContext, body: PatientCreate
           phone: body.phone,
           createdBy: context.actor.userId,
         });
-        await writeDiagnosis(context, patient, body.diagnosisGroup);
+        await writeDiagnosis(context, patient, { diagnosisGroup: body.diagnosisGroup, atRegistration: true });
         return patient;
       },
     });
@@ -77,14 +77,18 @@ export async function refuseTakenNumber(
 }
 
 /** A diagnosis entry that nobody has confirmed yet. */
-export async function writeDiagnosis(context: CommandContext, patient: Patient, diagnosisGroup: string): Promise<void> {
+export async function writeDiagnosis(
+  context: CommandContext,
+  patient: Patient,
+  details: { diagnosisGroup: string; atRegistration?: true },
+): Promise<void> {
   await FileEntry.create({
     id: randomUUID(),
     clinicId: patient.clinicId,
     patientId: patient.id,
     kind: 'diagnosis',
     onDate: clinicDate(context.clock.now(), context.actor.clinic.timeZone),
-    details: { diagnosisGroup, description: null, confirmedBy: null },
+    details: { description: null, confirmedBy: null, ...details },
     note: null,
     recordedBy: context.actor.userId,
   });

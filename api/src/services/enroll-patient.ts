@@ -6,6 +6,7 @@ import { Enrollment } from '../models/enrollment';
 import { Patient } from '../models/patient';
 import { Program } from '../models/program';
 import { visibleTo } from '../policies/policy';
+import { clinicDate } from '../time/clinic-time';
 import { runCommand, type CommandContext } from './command-context';
 import { createOnce, type Created } from './create-once';
 import { refreshPatientList } from './refresh-patient-list';
@@ -29,6 +30,8 @@ export async function enrollPatient(
         const program = await Program.findOne({ where: { id: body.programId, ...visibleTo(context.actor) } });
         if (!program || program.retiredAt !== null)
           throw invalidInput({ path: 'programId', message: 'Choose one of the clinic\u2019s programs' });
+        if (body.consentOn && body.consentOn > clinicDate(context.clock.now(), context.actor.clinic.timeZone))
+          throw invalidInput({ path: 'consentOn', message: 'This is in the future' });
         if (body.startOn < patient.birthDate)
           throw invalidInput({ path: 'startOn', message: 'This is before the patient was born' });
         const open = await Enrollment.findOne({

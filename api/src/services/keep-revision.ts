@@ -1,5 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { requireTransaction } from '../db/in-transaction';
+import { invalidInput } from '../errors/app-error';
 import { ClinicalRevision, type EntityKind } from '../models/clinical-revision';
 import type { CommandContext } from './command-context';
 
@@ -31,4 +32,10 @@ export async function keepRevision(
     changedBy: context.actor.userId,
     changedAt: context.clock.now(),
   });
+}
+
+/** An amendment names what it changes: a reason alone would only fill the history. */
+export function requireChanges(changes: object): void {
+  if (Object.values(changes).some((value) => value !== undefined)) return;
+  throw invalidInput({ path: 'reason', message: 'Nothing was changed. Say what should be different' });
 }

@@ -14,13 +14,22 @@ export async function refreshFlagsOf(context: CommandContext, measurement: Measu
   requireTransaction();
   for (const rule of flagRules) {
     const detail = measurement.voidedAt === null ? rule.detail(measurement) : null;
-    const occurrence = await FlagOccurrence.findOne({
-      where: { sourceKind: 'measurement', sourceId: measurement.id, withdrawnAt: null },
-    });
+    const occurrence = await standingOccurrence(measurement.id, rule.id);
     if (occurrence && detail === occurrence.detail) continue;
     if (occurrence) await withdraw(context, occurrence);
     if (detail !== null) await raise(context, measurement, rule.id, detail);
   }
+}
+
+/** The occurrence this measurement has under the rule, if it stands. */
+async function standingOccurrence(measurementId: string, rule: string): Promise<FlagOccurrence | null> {
+  const row = await selectRow<{ id: string }>(
+    `select o.id from flag_occurrences o join flags f on f.id = o.flag_id
+     where o.source_kind = 'measurement' and o.source_id = $measurementId and o.withdrawn_at is null
+       and f.rule = $rule`,
+    { measurementId, rule },
+  );
+  return row && (await FlagOccurrence.findByPk(row.id));
 }
 
 async function raise(context: CommandContext, measurement: Measurement, rule: string, detail: string): Promise<void> {

@@ -3,11 +3,10 @@ import { BodySize } from '../models/body-size';
 import { Patient } from '../models/patient';
 import { carriedHeight } from './carried-height';
 import { checkInstant } from './check-instant';
+import { bringInLine } from './bring-in-line';
 import { runCommand, type CommandContext } from './command-context';
 import { createOnce, type Created } from './create-once';
 import { withDerivedFacts } from './derived-facts';
-import { refreshCarriedHeights } from './refresh-carried-heights';
-import { refreshSummaries } from './refresh-summaries';
 import { syncMeasurements } from './sync-measurements';
 import { writeBodySize, type BodySizeSource } from './write-body-size';
 
@@ -28,8 +27,7 @@ export async function recordBodySize(
       find: (id) => BodySize.findByPk(id),
       create: async (id) => {
         await writeBodySizeFacts(context, patient, { ...body, kind: 'body-size', id, takenAt: new Date(body.takenAt) });
-        if (body.heightCm !== null) await refreshCarriedHeights(context, patient);
-        await refreshSummaries(context, patient);
+        await bringInLine(context, patient, { heights: body.heightCm !== null });
         return (await BodySize.findByPk(id))!;
       },
     });
@@ -47,7 +45,7 @@ export async function writeBodySizeFacts(
   await writeBodySize(context, patient, source);
   const height =
     source.heightCm === null
-      ? await carriedHeight(patient.id, source.takenAt, source.id)
+      ? await carriedHeight(context, patient.id, source.takenAt, source.id)
       : { heightCm: source.heightCm, heightMethod: source.heightMethod, heightCarried: false };
   const facts = source.weightKg === null ? [] : [{ measure: 'weight' as const, value: source.weightKg }];
   await syncMeasurements(

@@ -36,7 +36,7 @@ export async function recordFileEntry(
           note: body.note,
           recordedBy: context.actor.userId,
         });
-        await refreshDiagnosis(context, locked);
+        await refreshDiagnosis(locked);
         await refreshSummaries(context, locked);
         return row;
       },

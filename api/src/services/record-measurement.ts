@@ -3,10 +3,9 @@ import type { MeasurementCreate } from '@slighthill/shared/contracts/measurement
 import { Measurement } from '../models/measurement';
 import { Patient } from '../models/patient';
 import { checkInstant } from './check-instant';
+import { bringInLine } from './bring-in-line';
 import { runCommand, type CommandContext } from './command-context';
 import { createOnce, type Created } from './create-once';
-import { refreshCarriedHeights } from './refresh-carried-heights';
-import { refreshSummaries } from './refresh-summaries';
 import { writeMeasurementFacts } from './write-measurement-facts';
 
 /** Records a measure that is entered as one number, with what it was taken under. */
@@ -32,8 +31,7 @@ export async function recordMeasurement(
           conditions: withDefaultConditions(body.measure, body.conditions),
           safetyAnswer: body.item9,
         });
-        if (body.heightCm !== null) await refreshCarriedHeights(context, patient);
-        await refreshSummaries(context, patient);
+        await bringInLine(context, patient, { heights: body.heightCm !== null });
         return row;
       },
     });

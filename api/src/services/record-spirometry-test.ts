@@ -5,10 +5,9 @@ import { invalidInput } from '../errors/app-error';
 import { Patient } from '../models/patient';
 import { SpirometryTest } from '../models/spirometry-test';
 import { checkInstant } from './check-instant';
+import { bringInLine } from './bring-in-line';
 import { runCommand, type CommandContext } from './command-context';
 import { createOnce, type Created } from './create-once';
-import { refreshCarriedHeights } from './refresh-carried-heights';
-import { refreshSummaries } from './refresh-summaries';
 import { spirometryColumns, writeSpirometryFacts } from './write-spirometry-facts';
 
 /**
@@ -47,8 +46,7 @@ export async function recordSpirometryTest(
           const own = key === undefined && rows.length === 0 ? id : randomUUID();
           rows.push(await writeOne(context, patient, test, test.id ?? own, visitId));
         }
-        await refreshCarriedHeights(context, patient);
-        await refreshSummaries(context, patient);
+        await bringInLine(context, patient);
         return rows;
       },
     });

@@ -26,7 +26,7 @@ export async function refreshCarriedHeights(context: CommandContext, patient: Pa
   const bySource = new Map<string, Measurement[]>();
   for (const row of rows) bySource.set(row.sourceId, [...(bySource.get(row.sourceId) ?? []), row]);
   if (bySource.size === 0) return;
-  const heights = await carriedHeightsOf(patient.id);
+  const heights = await carriedHeightsOf(context, patient.id);
   for (const [sourceId, group] of bySource) {
     const first = group[0]!;
     const height = heights.get(sourceId) ?? null;

@@ -1,21 +1,20 @@
 import type { DiagnosisGroup } from '@slighthill/shared/contracts/patient';
 import { requireTransaction } from '../db/in-transaction';
-import { FileEntry } from '../models/file-entry';
+import { selectRow } from '../db/query';
 import type { Patient } from '../models/patient';
-import type { CommandContext } from './command-context';
 
-/** The patient's diagnosis group is that of the newest diagnosis entry that stands. */
-export async function refreshDiagnosis(_context: CommandContext, patient: Patient): Promise<void> {
+/**
+ * The patient's diagnosis group is that of the newest diagnosis entry that stands; the one made at registration counts
+ * only while there is no other.
+ */
+export async function refreshDiagnosis(patient: Patient): Promise<void> {
   requireTransaction();
-  const newest = await FileEntry.findOne({
-    where: { patientId: patient.id, kind: 'diagnosis', voidedAt: null },
-    order: [
-      ['onDate', 'DESC'],
-      ['createdAt', 'DESC'],
-      ['id', 'DESC'],
-    ],
-  });
-  const group = newest?.details.diagnosisGroup as DiagnosisGroup | undefined;
-  if (group && group !== patient.diagnosisGroup)
-    await patient.update({ diagnosisGroup: group, version: patient.version + 1 });
+  const newest = await selectRow<{ diagnosisGroup: DiagnosisGroup }>(
+    `select details ->> 'diagnosisGroup' as "diagnosisGroup" from file_entries
+     where patient_id = $patientId and kind = 'diagnosis' and voided_at is null
+     order by details ? 'atRegistration', on_date desc, created_at desc, id desc limit 1`,
+    { patientId: patient.id },
+  );
+  if (newest && newest.diagnosisGroup !== patient.diagnosisGroup)
+    await patient.update({ diagnosisGroup: newest.diagnosisGroup, version: patient.version + 1 });
 }

@@ -6,7 +6,7 @@ import { invalidInput } from '../errors/app-error';
 import { Patient } from '../models/patient';
 import { runCommand, type CommandContext } from './command-context';
 import { checkBirthDate, nameKeys, refuseTakenNumber, writeDiagnosis } from './create-patient';
-import { given } from './given';
+import { before, given } from './given';
 import { lockForChange } from './lock-for-change';
 import { refreshSummaries } from './refresh-summaries';
 
@@ -31,13 +31,14 @@ export async function updatePatient(context: CommandContext, id: string, body: P
       await refuseTestsBefore18(context, patient.id, changes.birthDate);
     }
     if (changes.recordNumber) await refuseTakenNumber(context, changes.recordNumber, patient.id);
+    context.audit.keepsBefore(before(patient, changes));
     await patient.update({
       ...changes,
       ...nameKeys(changes.givenName ?? patient.givenName, changes.familyName ?? patient.familyName),
       ...(changes.recordNumber ? { recordKey: searchKey(changes.recordNumber) } : {}),
       version: patient.version + 1,
     });
-    if (changes.diagnosisGroup) await writeDiagnosis(context, patient, changes.diagnosisGroup);
+    if (changes.diagnosisGroup) await writeDiagnosis(context, patient, { diagnosisGroup: changes.diagnosisGroup });
     if (changes.birthDate || changes.sexForPrediction || changes.diagnosisGroup)
       await refreshSummaries(context, patient);
     return patient;

@@ -7,13 +7,11 @@ import { FileEntry } from '../models/file-entry';
 import { Measurement } from '../models/measurement';
 import { Patient } from '../models/patient';
 import { SpirometryTest } from '../models/spirometry-test';
+import { bringInLine } from './bring-in-line';
 import { runCommand, type CommandContext } from './command-context';
-import { refreshCombinedMeasures } from './derived-facts';
 import { lockEntryForChange } from './lock-for-change';
 import { refreshFlagsOf } from './raise-flags';
 import { refreshDiagnosis } from './refresh-diagnosis';
-import { refreshCarriedHeights } from './refresh-carried-heights';
-import { refreshSummaries } from './refresh-summaries';
 
 export type VoidableKind = EntityKind;
 
@@ -40,10 +38,9 @@ export async function voidEntry(
       voidText: body.text,
     };
     await (row as Model).update({ ...mark, version: row.version + 1 });
-    if (kind === 'file-entry') await refreshDiagnosis(context, patient);
-    else await voidWhatFollows(context, patient, kind, row, mark);
-    await refreshCarriedHeights(context, patient);
-    await refreshSummaries(context, patient);
+    if (kind === 'file-entry') await refreshDiagnosis(patient);
+    else await voidWhatFollows(context, kind, row, mark);
+    await bringInLine(context, patient);
   });
 }
 
@@ -73,7 +70,6 @@ type VoidMark = Pick<Measurement, 'voidedAt' | 'voidedBy' | 'voidReason' | 'void
 
 async function voidWhatFollows(
   context: CommandContext,
-  patient: Patient,
   kind: Exclude<VoidableKind, 'file-entry'>,
   row: EntryRow,
   mark: VoidMark,
@@ -83,5 +79,4 @@ async function voidWhatFollows(
   await Measurement.update(mark, { where });
   if (!(row instanceof Measurement)) return;
   await refreshFlagsOf(context, row);
-  await refreshCombinedMeasures(context, patient, row.measure, [row.takenAt]);
 }

@@ -1,12 +1,12 @@
 import type { HeightMethod } from '@slighthill/shared/contracts/common';
 import type { SafetyAnswer } from '@slighthill/shared/contracts/measurement';
-import { getMeasure, type MeasureId } from '@slighthill/shared/measures';
+import type { MeasureId } from '@slighthill/shared/measures';
 import { requireTransaction } from '../db/in-transaction';
 import type { Measurement } from '../models/measurement';
 import type { Patient } from '../models/patient';
 import { carriedHeight } from './carried-height';
 import type { CommandContext } from './command-context';
-import { refreshCombinedMeasures, withDerivedFacts } from './derived-facts';
+import { withDerivedFacts } from './derived-facts';
 import { refreshFlagsOf } from './raise-flags';
 import { syncMeasurements } from './sync-measurements';
 import { writeBodySize } from './write-body-size';
@@ -25,7 +25,7 @@ export interface MeasurementFacts {
 }
 
 /**
- * Writes a single-value result and all that follows from it: the height it carries, BMI, combined measures, flags.
+ * Writes a single-value result and all that follows from it: the height it carries, BMI, flags.
  * A missing height is the newest measured one of the last 12 months, marked as carried.
  */
 export async function writeMeasurementFacts(
@@ -47,7 +47,7 @@ export async function writeMeasurementFacts(
   });
   const height =
     facts.heightCm === null
-      ? await carriedHeight(patient.id, takenAt, id)
+      ? await carriedHeight(context, patient.id, takenAt, id)
       : { heightCm: facts.heightCm, heightMethod: facts.heightMethod, heightCarried: false };
   const source = {
     kind: 'measurement' as const,
@@ -67,7 +67,5 @@ export async function writeMeasurementFacts(
   };
   const [row] = await syncMeasurements(context, patient, source, withDerivedFacts([own], source.heightCm));
   await refreshFlagsOf(context, row!);
-  if (getMeasure(facts.measure).entry === 'single')
-    await refreshCombinedMeasures(context, patient, facts.measure, [takenAt]);
   return row!;
 }

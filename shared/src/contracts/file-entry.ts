@@ -59,6 +59,8 @@ export const fileDetails = {
     diagnosisGroup: z.enum(diagnosisGroups, { error: 'Choose a diagnosis group' }),
     description: optionalText(300),
     confirmedBy: optionalText(120),
+    /** Set on the entry that came with the patient's registration; any other entry goes before it. */
+    atRegistration: z.literal(true).optional(),
   }),
   exacerbation: z.strictObject({
     steroid: z.boolean().default(false),
