@@ -1,5 +1,5 @@
-import { typed } from "../forms/number-questions";
-import type { TestSet } from "./spirometry-form";
+import { typed } from '../forms/number-questions';
+import type { TestSet } from './spirometry-form';
 
 export interface BestPreview {
   fev1: number | null;
@@ -18,10 +18,7 @@ interface Candidate {
 
 /** The larger value; of two equal ones the earlier blow. */
 const largest = (candidates: readonly Candidate[]): Candidate | null =>
-  candidates.reduce<Candidate | null>(
-    (best, next) => (best && best.value >= next.value ? best : next),
-    null,
-  );
+  candidates.reduce<Candidate | null>((best, next) => (best && best.value >= next.value ? best : next), null);
 
 const ratioOf = (fev1: number | null, fvc: number | null): number | null =>
   fev1 !== null && fvc !== null && fvc > 0 && fev1 <= fvc ? fev1 / fvc : null;
@@ -32,12 +29,8 @@ const ratioOf = (fev1: number | null, fvc: number | null): number | null =>
  * preview: the server decides.
  */
 export const bestPreview = (set: TestSet): BestPreview => {
-  if (set.entry === "best") {
-    const [fev1, fvc, pef] = [
-      typed(set.best.fev1),
-      typed(set.best.fvc),
-      typed(set.best.pef),
-    ];
+  if (set.entry === 'best') {
+    const [fev1, fvc, pef] = [typed(set.best.fev1), typed(set.best.fvc), typed(set.best.pef)];
     return {
       fev1,
       fvc,
@@ -51,18 +44,12 @@ export const bestPreview = (set: TestSet): BestPreview => {
   const fvcs: Candidate[] = [];
   const pefs: Candidate[] = [];
   set.rows.forEach((blow, row) => {
-    const [fev1, fvc, pef] = [
-      typed(blow.fev1),
-      typed(blow.fvc),
-      typed(blow.pef),
-    ];
+    const [fev1, fvc, pef] = [typed(blow.fev1), typed(blow.fvc), typed(blow.pef)];
     const impossible = fev1 !== null && fvc !== null && fev1 > fvc;
     if (impossible) return;
-    if (fev1 !== null && fev1 > 0 && blow.fev1Used)
-      fev1s.push({ row, value: fev1 });
+    if (fev1 !== null && fev1 > 0 && blow.fev1Used) fev1s.push({ row, value: fev1 });
     if (fvc !== null && fvc > 0 && blow.fvcUsed) fvcs.push({ row, value: fvc });
-    if (pef !== null && pef > 0 && blow.fev1Used)
-      pefs.push({ row, value: pef });
+    if (pef !== null && pef > 0 && blow.fev1Used) pefs.push({ row, value: pef });
   });
   const [fev1, fvc, pef] = [largest(fev1s), largest(fvcs), largest(pefs)];
   return {
@@ -76,5 +63,4 @@ export const bestPreview = (set: TestSet): BestPreview => {
 };
 
 /** FEV1/FVC of one row, or null while it cannot be said. */
-export const rowRatio = (fev1: string, fvc: string): number | null =>
-  ratioOf(typed(fev1), typed(fvc));
+export const rowRatio = (fev1: string, fvc: string): number | null => ratioOf(typed(fev1), typed(fvc));

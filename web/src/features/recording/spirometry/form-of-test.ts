@@ -1,31 +1,16 @@
-import type { SpirometryTest } from "@slighthill/shared/contracts/spirometry-test";
-import { toLocalInput } from "../../../lib/clinic-time";
-import {
-  emptyRow,
-  emptySet,
-  rowCount,
-  type BestRow,
-  type SpirometryForm,
-  type TestSet,
-} from "./spirometry-form";
+import type { SpirometryTest } from '@slighthill/shared/contracts/spirometry-test';
+import { toLocalInput } from '../../../lib/clinic-time';
+import { emptyRow, emptySet, rowCount, type BestRow, type SpirometryForm, type TestSet } from './spirometry-form';
 
 /** A volume as it is usually typed; a third decimal stays where there is one. */
 const volume = (liters: number | null): string => {
-  if (liters === null) return "";
-  return Math.round(liters * 1000) % 10 === 0
-    ? liters.toFixed(2)
-    : String(liters);
+  if (liters === null) return '';
+  return Math.round(liters * 1000) % 10 === 0 ? liters.toFixed(2) : String(liters);
 };
 
-const write = (value: number | null): string =>
-  value === null ? "" : String(value);
+const write = (value: number | null): string => (value === null ? '' : String(value));
 
-const bestOf = ({
-  fev1,
-  fvc,
-  pef,
-  fef2575,
-}: SpirometryTest["best"]): BestRow => ({
+const bestOf = ({ fev1, fvc, pef, fef2575 }: SpirometryTest['best']): BestRow => ({
   fev1: volume(fev1),
   fvc: volume(fvc),
   pef: write(pef),
@@ -45,18 +30,15 @@ const setOf = (test: SpirometryTest): TestSet => ({
       time: write(maneuver.forcedTimeS),
       fev1Used: maneuver.fev1Accepted,
       fvcUsed: maneuver.fvcAccepted,
-      reason: maneuver.reason ?? "",
+      reason: maneuver.reason ?? '',
     };
   }),
-  best: test.entry === "best" ? bestOf(test.best) : emptySet().best,
+  best: test.entry === 'best' ? bestOf(test.best) : emptySet().best,
 });
 
 /** The form as it would have been typed for a test in the record. */
-export const formOfTest = (
-  test: SpirometryTest,
-  timeZone: string,
-): SpirometryForm => {
-  const after = test.bronchodilator === "after";
+export const formOfTest = (test: SpirometryTest, timeZone: string): SpirometryForm => {
+  const after = test.bronchodilator === 'after';
   return {
     ids: { visit: test.visitId, before: test.id, after: test.id },
     performedAt: toLocalInput(test.performedAt, timeZone),
@@ -64,15 +46,15 @@ export const formOfTest = (
     heightMethod: test.heightMethod,
     weightKg: write(test.weightKg),
     state: test.bronchodilator,
-    drug: test.drug ?? "",
+    drug: test.drug ?? '',
     doseMcg: write(test.doseMcg),
     minutesSinceDose: write(test.minutesSinceDose),
     ownHoursAgo: write(test.ownBronchodilatorHoursAgo),
     before: after ? emptySet() : setOf(test),
     after: after ? setOf(test) : emptySet(),
     withFef: test.maneuvers.some((maneuver) => maneuver.fef2575 !== null),
-    note: test.note ?? "",
+    note: test.note ?? '',
     answered: [],
-    amendReason: "",
+    amendReason: '',
   };
 };

@@ -1,5 +1,5 @@
-import { heightMethods } from "@slighthill/shared/contracts/common";
-import { z } from "zod";
+import { heightMethods } from '@slighthill/shared/contracts/common';
+import { z } from 'zod';
 
 export const rowCount = 8;
 
@@ -22,19 +22,13 @@ const bestRow = z.object({
 });
 
 const testSet = z.object({
-  entry: z.enum(["maneuvers", "best"]),
+  entry: z.enum(['maneuvers', 'best']),
   rows: z.array(blowRow).length(rowCount),
   best: bestRow,
 });
 
 /** `given` in a new test opens both sets; the other words say what one test is. */
-export const formStates = [
-  "given",
-  "before",
-  "after",
-  "none",
-  "unknown",
-] as const;
+export const formStates = ['given', 'before', 'after', 'none', 'unknown'] as const;
 export type FormState = (typeof formStates)[number];
 
 /**
@@ -66,43 +60,40 @@ export type BlowRow = z.infer<typeof blowRow>;
 export type BestRow = z.infer<typeof bestRow>;
 export type TestSet = z.infer<typeof testSet>;
 export type SpirometryForm = z.infer<typeof spirometryForm>;
-export type SetName = "before" | "after";
+export type SetName = 'before' | 'after';
 
 export const emptyRow = (): BlowRow => ({
-  fev1: "",
-  fvc: "",
-  pef: "",
-  fef2575: "",
-  time: "",
+  fev1: '',
+  fvc: '',
+  pef: '',
+  fef2575: '',
+  time: '',
   fev1Used: true,
   fvcUsed: true,
-  reason: "",
+  reason: '',
 });
 
 export const emptySet = (): TestSet => ({
-  entry: "maneuvers",
+  entry: 'maneuvers',
   rows: Array.from({ length: rowCount }, emptyRow),
-  best: { fev1: "", fvc: "", pef: "", fef2575: "" },
+  best: { fev1: '', fvc: '', pef: '', fef2575: '' },
 });
 
-export const emptySpirometryForm = (
-  performedAt: string,
-  newId: () => string,
-): SpirometryForm => ({
+export const emptySpirometryForm = (performedAt: string, newId: () => string): SpirometryForm => ({
   ids: { visit: newId(), before: newId(), after: newId() },
   performedAt,
-  heightCm: "",
-  heightMethod: "measured",
-  weightKg: "",
-  state: "given",
-  drug: "",
-  doseMcg: "",
-  minutesSinceDose: "",
-  ownHoursAgo: "",
+  heightCm: '',
+  heightMethod: 'measured',
+  weightKg: '',
+  state: 'given',
+  drug: '',
+  doseMcg: '',
+  minutesSinceDose: '',
+  ownHoursAgo: '',
   before: emptySet(),
   after: emptySet(),
   withFef: false,
-  note: "",
+  note: '',
   answered: [],
-  amendReason: "",
+  amendReason: '',
 });

@@ -1,18 +1,9 @@
-import {
-  spirometryTestCreate,
-  type SpirometryTestCreate,
-} from "@slighthill/shared/contracts/spirometry-test";
-import { fromLocalInput } from "../../../lib/clinic-time";
-import { parseDecimal } from "../../../lib/parse-decimal";
-import { issuesOf, type FormIssue } from "../forms/form-issues";
-import type {
-  BestRow,
-  BlowRow,
-  FormState,
-  SetName,
-  SpirometryForm,
-} from "./spirometry-form";
-import { hiddenFilledSet, isEmptyRow, isFilledSet, setsOf } from "./test-sets";
+import { spirometryTestCreate, type SpirometryTestCreate } from '@slighthill/shared/contracts/spirometry-test';
+import { fromLocalInput } from '../../../lib/clinic-time';
+import { parseDecimal } from '../../../lib/parse-decimal';
+import { issuesOf, type FormIssue } from '../forms/form-issues';
+import type { BestRow, BlowRow, FormState, SetName, SpirometryForm } from './spirometry-form';
+import { hiddenFilledSet, isEmptyRow, isFilledSet, setsOf } from './test-sets';
 
 /** One test as it would be sent, and the form rows its maneuvers came from. */
 interface PlannedTest {
@@ -30,7 +21,7 @@ export interface CheckedSpirometry {
   }[];
 }
 
-const setTitles: Record<SetName, string> = { before: "Before", after: "After" };
+const setTitles: Record<SetName, string> = { before: 'Before', after: 'After' };
 
 const numbersOf = (row: BestRow) => ({
   fev1: parseDecimal(row.fev1),
@@ -47,46 +38,28 @@ const maneuverOf = (row: BlowRow) => ({
   reason: row.reason,
 });
 
-const stateOf = (
-  state: FormState,
-  set: SetName,
-): Exclude<FormState, "given"> => (state === "given" ? set : state);
+const stateOf = (state: FormState, set: SetName): Exclude<FormState, 'given'> => (state === 'given' ? set : state);
 
 /** Before a dose is at least this much earlier than after it, so that the two of a pair have an order. */
 const minutesBetween = { least: 1, most: 1440 } as const;
 
 /** The date and time entered are those of the test after the dose; the one before it is earlier by the time waited. */
-const performedAtOf = (
-  form: SpirometryForm,
-  set: SetName,
-  timeZone: string,
-  paired: boolean,
-): string => {
+const performedAtOf = (form: SpirometryForm, set: SetName, timeZone: string, paired: boolean): string => {
   const at = fromLocalInput(form.performedAt, timeZone);
-  if (at === null) return "";
-  if (!paired || set === "after") return at;
+  if (at === null) return '';
+  if (!paired || set === 'after') return at;
   const waited = parseDecimal(form.minutesSinceDose);
   // What is no number of minutes is refused at its own field.
-  const known =
-    waited !== null &&
-    waited >= minutesBetween.least &&
-    waited <= minutesBetween.most;
+  const known = waited !== null && waited >= minutesBetween.least && waited <= minutesBetween.most;
   const minutes = known ? waited : minutesBetween.least;
   return new Date(Date.parse(at) - Math.round(minutes) * 60_000).toISOString();
 };
 
-const plan = (
-  form: SpirometryForm,
-  set: SetName,
-  timeZone: string,
-  paired: boolean,
-): PlannedTest => {
+const plan = (form: SpirometryForm, set: SetName, timeZone: string, paired: boolean): PlannedTest => {
   const { entry, rows: allRows, best } = form[set];
-  const rows = allRows.flatMap((row, index) =>
-    isEmptyRow(row) ? [] : [index],
-  );
+  const rows = allRows.flatMap((row, index) => (isEmptyRow(row) ? [] : [index]));
   const state = stateOf(form.state, set);
-  const after = state === "after";
+  const after = state === 'after';
   return {
     set,
     rows,
@@ -103,19 +76,16 @@ const plan = (
       doseMcg: after ? parseDecimal(form.doseMcg) : null,
       minutesSinceDose: after ? parseDecimal(form.minutesSinceDose) : null,
       ownBronchodilatorHoursAgo: parseDecimal(form.ownHoursAgo),
-      best: entry === "best" ? numbersOf(best) : null,
-      maneuvers:
-        entry === "maneuvers"
-          ? rows.map((index) => maneuverOf(allRows[index]!))
-          : null,
+      best: entry === 'best' ? numbersOf(best) : null,
+      maneuvers: entry === 'maneuvers' ? rows.map((index) => maneuverOf(allRows[index]!)) : null,
       note: form.note,
     },
   };
 };
 
 const topNames: Record<string, string> = {
-  bronchodilator: "state",
-  ownBronchodilatorHoursAgo: "ownHoursAgo",
+  bronchodilator: 'state',
+  ownBronchodilatorHoursAgo: 'ownHoursAgo',
 };
 
 /** Where a message about a test's request belongs in the form. */
@@ -124,53 +94,39 @@ export const spirometryFormPath = (
   test: { set: SetName; rows: readonly number[] },
 ): string => {
   const [first, second, third] = path.map(String);
-  if (first === "maneuvers") {
+  if (first === 'maneuvers') {
     const row = test.rows[Number(second)] ?? 0;
-    return `${test.set}.rows.${row}.${third === "forcedTimeS" ? "time" : (third ?? "fev1")}`;
+    return `${test.set}.rows.${row}.${third === 'forcedTimeS' ? 'time' : (third ?? 'fev1')}`;
   }
-  if (first === "best") return `${test.set}.best.${second ?? "fev1"}`;
-  return topNames[first ?? ""] ?? first ?? "state";
+  if (first === 'best') return `${test.set}.best.${second ?? 'fev1'}`;
+  return topNames[first ?? ''] ?? first ?? 'state';
 };
 
 export const textAt = (form: object, path: string): unknown =>
-  path
-    .split(".")
-    .reduce<unknown>(
-      (at, key) => (at as Record<string, unknown> | undefined)?.[key],
-      form,
-    );
+  path.split('.').reduce<unknown>((at, key) => (at as Record<string, unknown> | undefined)?.[key], form);
 
 const nothingTyped = (form: SpirometryForm): FormIssue => {
   const set = setsOf(form.state)[0]!;
-  return form[set].entry === "best"
-    ? { path: `${set}.best.fev1`, message: "Enter the best values" }
-    : { path: `${set}.rows.0.fev1`, message: "Enter at least one maneuver" };
+  return form[set].entry === 'best'
+    ? { path: `${set}.best.fev1`, message: 'Enter the best values' }
+    : { path: `${set}.rows.0.fev1`, message: 'Enter at least one maneuver' };
 };
 
 /** Holds the form to the API's contract: what would be sent, or what stands against it at the form's own fields. */
-export const checkSpirometry = (
-  form: SpirometryForm,
-  timeZone: string,
-): CheckedSpirometry => {
+export const checkSpirometry = (form: SpirometryForm, timeZone: string): CheckedSpirometry => {
   const hidden = hiddenFilledSet(form);
   if (hidden) {
     const message = `There are numbers under ${setTitles[hidden]} bronchodilator. Choose "Given in this test" or clear them`;
-    return { issues: [{ path: "state", message }], tests: [] };
+    return { issues: [{ path: 'state', message }], tests: [] };
   }
   const filled = setsOf(form.state).filter((set) => isFilledSet(form[set]));
   if (filled.length === 0) return { issues: [nothingTyped(form)], tests: [] };
-  const isEmpty = (path: string): boolean => textAt(form, path) === "";
+  const isEmpty = (path: string): boolean => textAt(form, path) === '';
   const checked: CheckedSpirometry = { issues: [], tests: [] };
   for (const set of filled) {
     const { rows, body } = plan(form, set, timeZone, filled.length > 1);
     const result = spirometryTestCreate.safeParse(body);
-    checked.issues.push(
-      ...issuesOf(
-        result,
-        (path) => spirometryFormPath(path, { set, rows }),
-        isEmpty,
-      ),
-    );
+    checked.issues.push(...issuesOf(result, (path) => spirometryFormPath(path, { set, rows }), isEmpty));
     if (result.success) checked.tests.push({ set, rows, body: result.data });
   }
   return checked;

@@ -1,10 +1,7 @@
-import { useQuery } from "@tanstack/react-query";
-import type {
-  PredictionBody,
-  PredictionResponse,
-} from "@slighthill/shared/contracts/prediction";
-import { useDebounced } from "../../../lib/use-debounced";
-import { predictionQuery } from "../queries";
+import { useQuery } from '@tanstack/react-query';
+import type { PredictionBody, PredictionResponse } from '@slighthill/shared/contracts/prediction';
+import { useDebounced } from '../../../lib/use-debounced';
+import { predictionQuery } from '../queries';
 
 export interface Preview {
   data: PredictionResponse | null;
@@ -17,15 +14,11 @@ export interface Preview {
 export const usePreview = (request: PredictionBody | null): Preview => {
   const text = JSON.stringify(request);
   const settled = useDebounced(text, 400);
-  const query = useQuery(
-    predictionQuery(JSON.parse(settled) as PredictionBody | null),
-  );
+  const query = useQuery(predictionQuery(JSON.parse(settled) as PredictionBody | null));
   const nothing = request === null;
   return {
     data: nothing ? null : (query.data ?? null),
-    updating:
-      !nothing &&
-      (settled !== text || query.isPlaceholderData || query.isLoading),
+    updating: !nothing && (settled !== text || query.isPlaceholderData || query.isLoading),
     failed: !nothing && query.isError,
   };
 };

@@ -1,15 +1,11 @@
-import { useCallback, useState } from "react";
-import { useClinicZone } from "../../../lib/session";
-import type { FormIssue } from "../forms/form-issues";
-import { useRecordForm, type RecordFormState } from "../forms/use-record-form";
-import type { SetName, SpirometryForm } from "./spirometry-form";
-import {
-  setOfField,
-  spirometryQuestions,
-  type SpirometryEarlier,
-} from "./spirometry-questions";
-import { checkSpirometry } from "./spirometry-request";
-import { setsOf } from "./test-sets";
+import { useCallback, useState } from 'react';
+import { useClinicZone } from '../../../lib/session';
+import type { FormIssue } from '../forms/form-issues';
+import { useRecordForm, type RecordFormState } from '../forms/use-record-form';
+import type { SetName, SpirometryForm } from './spirometry-form';
+import { setOfField, spirometryQuestions, type SpirometryEarlier } from './spirometry-questions';
+import { checkSpirometry } from './spirometry-request';
+import { setsOf } from './test-sets';
 
 export interface SpirometryFormState extends RecordFormState<SpirometryForm> {
   tab: SetName;
@@ -24,12 +20,9 @@ export const useSpirometryForm = (
   further: (form: SpirometryForm) => readonly FormIssue[] = noFurther,
 ): SpirometryFormState => {
   const timeZone = useClinicZone();
-  const [chosen, setTab] = useState<SetName>("before");
+  const [chosen, setTab] = useState<SetName>('before');
   const check = useCallback(
-    (form: SpirometryForm) => [
-      ...further(form),
-      ...checkSpirometry(form, timeZone).issues,
-    ],
+    (form: SpirometryForm) => [...further(form), ...checkSpirometry(form, timeZone).issues],
     [timeZone, further],
   );
   const reveal = useCallback((field: string) => {
