@@ -36,8 +36,3 @@ export interface Problem {
 }
 
 export const problemType = (code: ErrorCode): string => `/problems/${code}`;
-
-export function problemCode(problem: Pick<Problem, 'type'>): ErrorCode | null {
-  const code = problem.type.replace(/^\/problems\//, '');
-  return code in errorTable ? (code as ErrorCode) : null;
-}
