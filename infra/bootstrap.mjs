@@ -43,7 +43,8 @@ function bringPackagesUpToDate() {
   const startedAt = Date.now();
   console.log(state === 'missing' ? 'Installing packages …' : 'Packages changed; installing them again …');
   const npmCli = process.env.npm_execpath;
-  const flags = ['ci', '--no-audit', '--no-fund', '--prefer-offline'];
+  // With NODE_ENV=production npm leaves out what the commands themselves run on: tsx, vite, esbuild.
+  const flags = ['ci', '--include=dev', '--no-audit', '--no-fund', '--prefer-offline'];
   const result = npmCli?.endsWith('.js')
     ? spawnSync(process.execPath, [npmCli, ...flags], { cwd: projectRoot, stdio: 'inherit' })
     : spawnSync('npm', flags, { cwd: projectRoot, stdio: 'inherit' });
