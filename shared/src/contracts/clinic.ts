@@ -96,10 +96,10 @@ export const program = z.object({
 
 const programFields = {
   name: text(120, 'The name'),
-  plannedSessions: between('Sessions', 1, 200, 'sessions').int('Use a whole number of sessions'),
-  weeks: between('Weeks', 1, 104, 'weeks').int('Use whole weeks'),
-  sessionsPerDay: between('Sessions a day', 1, 4, 'a day').int('Use a whole number'),
-  sessionsPerWeek: between('Sessions a week', 1, 14, 'a week').int('Use a whole number'),
+  plannedSessions: between('Sessions', 1, 200).int('Use a whole number of sessions'),
+  weeks: between('Weeks', 1, 104).int('Use whole weeks'),
+  sessionsPerDay: between('Sessions a day', 1, 4).int('Use a whole number'),
+  sessionsPerWeek: between('Sessions a week', 1, 14).int('Use a whole number'),
   sessionKinds: z.array(z.enum(sessionKinds)).min(1, 'Choose at least one kind'),
 };
 

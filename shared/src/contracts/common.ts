@@ -1,4 +1,8 @@
 import { z } from 'zod';
+import { heightLimitsCm, questionHeight } from '../measures/registry';
+import { plainWords } from './plain-words';
+
+z.config({ customError: plainWords });
 
 export const uuid = z.uuid({ error: 'Not a valid id' });
 export const instant = z.iso.datetime({ offset: true, error: 'Enter a date and time with a time zone' });
@@ -24,11 +28,13 @@ export const optionalText = (max: number) =>
 
 export const numberField = (label: string) => z.number({ error: `${label} must be a number` });
 
-/** Optional number between two limits, both allowed. */
-export const between = (label: string, min: number, max: number, unit: string) =>
-  numberField(label)
-    .min(min, `${label} must be ${min} ${unit} or more`)
-    .max(max, `${label} must be ${max} ${unit} or less`);
+/** A number between two limits, both allowed; `unit` only where the label does not say it already. */
+export const between = (label: string, min: number, max: number, unit = '') => {
+  const withUnit = (limit: number) => (unit ? `${limit} ${unit}` : `${limit}`);
+  return numberField(label)
+    .min(min, `${label} must be ${withUnit(min)} or more`)
+    .max(max, `${label} must be ${withUnit(max)} or less`);
+};
 
 export const cursorQuery = {
   cursor: z.string().max(500).optional(),
@@ -53,15 +59,11 @@ export const voidReasons = ['wrong-patient', 'wrong-test', 'duplicate', 'other']
 
 /** Standing height limits of rule 0.6; a value that looks like inches or metres is named, never converted. */
 export const heightCm = numberField('Height').superRefine((value, context) => {
-  if (value >= 120 && value <= 220) return;
-  const inCm = Math.round(value * 25.4) / 10;
-  const hint =
-    value >= 48 && value <= 84
-      ? ` ${value} looks like inches: that is ${inCm} cm.`
-      : value >= 1.2 && value <= 2.2
-        ? ` ${value} looks like meters: that is ${Math.round(value * 100)} cm.`
-        : '';
-  context.addIssue({ code: 'custom', message: `Height must be between 120 and 220 cm.${hint}` });
+  const { min, max } = heightLimitsCm;
+  if (value >= min && value <= max) return;
+  const unit = questionHeight(value);
+  const hint = unit ? ` ${value} looks like ${unit.looksLike}: that is ${unit.suggestionCm} cm.` : '';
+  context.addIssue({ code: 'custom', message: `Height must be between ${min} and ${max} cm.${hint}` });
 });
 
 export const weightKg = between('Weight', 20, 350, 'kg');

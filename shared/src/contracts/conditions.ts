@@ -1,22 +1,33 @@
-import { getMeasure, type MeasureId } from '../measures/registry';
+import { getMeasure, type Condition, type MeasureId } from '../measures/registry';
 
 export type Conditions = Record<string, number | boolean | string>;
 
-/** Says what is wrong with comparison conditions: keys the registry does not declare, or values of another type. */
+const anyAmount = { min: 0, max: 10_000 };
+
+function numberProblem({ label, range = anyAmount, unit, whole }: Condition, value: number): string | null {
+  if (!(value >= range.min && value <= range.max))
+    return `${label} must be ${range.min} to ${range.max}${unit ? ` ${unit}` : ''}`;
+  return whole && !Number.isInteger(value) ? `${label} must be a whole number` : null;
+}
+
+function conditionProblem(condition: Condition, value: number | boolean | string): string | null {
+  const { label, type } = condition;
+  if (type === 'choice') {
+    const choices: readonly unknown[] = condition.choices ?? [];
+    return choices.includes(value) ? null : `${label} must be one of ${choices.join(', ')}`;
+  }
+  if (type === 'boolean') return typeof value === 'boolean' ? null : `${label} must be yes or no`;
+  return typeof value === 'number' ? numberProblem(condition, value) : `${label} must be a number`;
+}
+
+/** Says what is wrong with comparison conditions: keys the registry does not declare, or values it does not allow. */
 export function checkConditions(measureId: MeasureId, conditions: Conditions): { key: string; message: string }[] {
   const declared = getMeasure(measureId).conditions;
   return Object.entries(conditions).flatMap(([key, value]) => {
     const condition = declared[key];
     if (!condition) return [{ key, message: `${getMeasure(measureId).label} has no condition "${key}"` }];
-    if (condition.type === 'choice') {
-      const choices: readonly string[] = condition.choices ?? [];
-      if (typeof value === 'string' && choices.includes(value)) return [];
-      return [{ key, message: `${condition.label} must be one of ${choices.join(', ')}` }];
-    }
-    if (typeof value !== condition.type) return [{ key, message: `${condition.label} must be a ${condition.type}` }];
-    if (condition.type === 'number' && !((value as number) >= 0 && (value as number) <= 10_000))
-      return [{ key, message: `${condition.label} must be 0 or more` }];
-    return [];
+    const message = conditionProblem(condition, value);
+    return message === null ? [] : [{ key, message }];
   });
 }
 

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { checkValue, getMeasure, isMeasureId, measureIds } from '../measures/registry';
+import { checkValue, getMeasure, isMeasureId, measureIds, type Measure } from '../measures/registry';
 import {
   amendReason,
   calendarDate,
@@ -25,11 +25,24 @@ export type SafetyAnswer = (typeof safetyAnswers)[number];
 
 /** The ninth answer of a PHQ-9: 0 to 3, or said to be missing. Read as text so that a form and the API agree. */
 const item9 = z
-  .union([z.int().min(0).max(3), z.enum(safetyAnswers)], { error: 'Enter 0, 1, 2, 3 or not answered' })
+  .union([z.literal([0, 1, 2, 3]), z.enum(safetyAnswers)], { error: 'Enter 0, 1, 2, 3 or not answered' })
   .transform((answer) => String(answer) as SafetyAnswer);
 
-const conditionValue = z.union([z.number(), z.boolean(), z.string().max(60)]);
+const conditionValue = z.union([z.number(), z.boolean(), z.string().max(60)], {
+  error: 'Must be a number, yes or no, or one of the choices',
+});
 export const conditions = z.record(z.string().max(40), conditionValue);
+
+/** A total its one answer leaves no room for: both are read off the same sheet, so one of them is mistyped. */
+function totalProblem({ safetyItem, shortLabel }: Measure, total: number, answer: SafetyAnswer): string | null {
+  if (!safetyItem) return null;
+  const answered = answer === 'not-answered' ? 0 : Number(answer);
+  const most = safetyItem.maxOfOthers + answered;
+  if (total < answered) return `The ${shortLabel} total cannot be less than its ninth answer, ${answered}`;
+  if (total <= most) return null;
+  const given = answer === 'not-answered' ? 'Without the ninth answer' : `With ${answered} as the ninth answer`;
+  return `${given} the ${shortLabel} total is at most ${most}`;
+}
 
 const fields = {
   takenAt: instant,
@@ -61,6 +74,9 @@ export const measurementCreate = z
       refuse(['conditions', error.key], error.message);
     if (measure.safetyItem && body.item9 === null)
       refuse(['item9'], 'The ninth answer is needed: 0, 1, 2, 3 or not answered');
+    const total =
+      body.item9 === null || (found && 'problem' in found) ? null : totalProblem(measure, body.value, body.item9);
+    if (total !== null) refuse(['value'], total);
     if (!measure.safetyItem && body.item9 !== null) refuse(['item9'], `${measure.label} has no ninth answer`);
   });
 

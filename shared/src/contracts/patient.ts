@@ -24,8 +24,9 @@ export {
   type SexForPrediction,
 } from '../vocabulary';
 
+const emailExample = 'Enter an e-mail address such as name@example.org';
 const email = z
-  .union([z.literal(''), z.email({ error: 'Enter an e-mail address such as name@example.org' }).max(254)])
+  .union([z.literal(''), z.email({ error: emailExample }).max(254)], { error: emailExample })
   .nullish()
   .transform((value) => value || null);
 

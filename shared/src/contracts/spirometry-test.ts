@@ -80,8 +80,8 @@ const testFields = {
   bronchodilator: z.enum(bronchodilatorStates, { error: 'Say whether a bronchodilator was given' }),
   drug: optionalText(80),
   doseMcg: orNull(between('Dose', 1, 20000, 'micrograms')),
-  minutesSinceDose: orNull(between('Minutes since the dose', 0, 1440, 'minutes').int('Use whole minutes')),
-  ownBronchodilatorHoursAgo: orNull(between('Hours since own bronchodilator', 0, 720, 'hours')),
+  minutesSinceDose: orNull(between('Minutes since the dose', 0, 1440).int('Use whole minutes')),
+  ownBronchodilatorHoursAgo: orNull(between('Hours since own bronchodilator', 0, 720)),
   best: bestValues.nullish().transform((value) => value ?? null),
   maneuvers: z
     .array(maneuver)
@@ -95,9 +95,20 @@ const testFields = {
 const exactlyOne = (test: { best: unknown; maneuvers: unknown }) => (test.best === null) !== (test.maneuvers === null);
 const exactlyOneError = { path: ['maneuvers'], message: 'Enter either the maneuvers or the best values' };
 
+const ofTheDose = {
+  drug: 'No bronchodilator was given, so there is no drug',
+  doseMcg: 'No bronchodilator was given, so there is no dose',
+  minutesSinceDose: 'No bronchodilator was given, so there is no time since it',
+} as const;
+
 export const spirometryTestCreate = z
   .strictObject({ id: uuid.optional(), visitId: uuid.optional(), ...testFields })
-  .refine(exactlyOne, exactlyOneError);
+  .refine(exactlyOne, exactlyOneError)
+  .superRefine((test, context) => {
+    if (test.bronchodilator !== 'none') return;
+    for (const [field, message] of Object.entries(ofTheDose))
+      if (test[field as keyof typeof ofTheDose] !== null) context.addIssue({ code: 'custom', path: [field], message });
+  });
 
 export const spirometryPairCreate = z
   .strictObject({ tests: z.tuple([spirometryTestCreate, spirometryTestCreate]) })

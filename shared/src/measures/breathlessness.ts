@@ -10,7 +10,7 @@ export const mmrc = defineMeasure({
   unit: { symbol: 'grade', ucum: '{score}' },
   codeNote: 'No LOINC code confirmed; SNOMED CT 870179002',
   absolute: { min: 0, max: 4 },
-  importantDifference: { value: 1, source: 'One grade; from memory, check before clinical use' },
+  importantDifference: { value: 1, source: 'One grade; no paper at hand, from memory, check before clinical use' },
   hint: 'This scale runs from 0 to 4. The older MRC scale runs from 1 to 5: take one off.',
   // Our own short words for the grades, not the questionnaire's.
   gradeDescriptions: [
@@ -34,7 +34,7 @@ const borg = {
   absolute: { min: 0, max: 10 },
   importantDifference: {
     value: 1,
-    source: 'One unit at equal work; from memory, check before clinical use',
+    source: 'One unit at equal work (Ries 2005, COPD 2:105); from memory, check before clinical use',
     note: 'Two units in the ATS/ERS 2008 outcomes table (Ries)',
   },
   conditions: {

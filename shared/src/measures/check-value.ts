@@ -8,8 +8,9 @@ export type ValueCheck =
 
 const inside = (value: number, range: Range): boolean => value >= range.min && value <= range.max;
 
+/** Scores go without a unit: "must be 0 to 4", since the label says what is scored. */
 const withUnit = (text: string, measure: Measure): string => {
-  const symbol = measure.unit.symbol;
+  const symbol = measure.unit.ucum === '{score}' ? '' : measure.unit.symbol;
   if (symbol === '%') return `${text}%`;
   return symbol ? `${text} ${symbol}` : text;
 };

@@ -7,11 +7,28 @@ const oxygenLpm: Condition = {
   label: 'Oxygen during the test',
   type: 'number',
   unit: 'L/min',
+  range: { min: 0, max: 60 },
   default: 0,
   onDifference: 'notes',
 };
 
-const walks: Condition = { label: 'Number of walks', type: 'number', default: 1, onDifference: 'notes' };
+const walks: Condition = {
+  label: 'Number of walks',
+  type: 'number',
+  range: { min: 1, max: 10 },
+  whole: true,
+  default: 1,
+  onDifference: 'notes',
+};
+
+const courseM: Condition = {
+  label: 'Course length',
+  type: 'number',
+  unit: 'm',
+  range: { min: 5, max: 100 },
+  default: 30,
+  onDifference: 'blocks',
+};
 
 const aid: Condition = {
   label: 'Walking aid',
@@ -40,7 +57,7 @@ export const sixMinuteWalkDistance = defineMeasure({
     note: 'Published range 25 to 33 m; older table 37 to 71 m (ATS/ERS 2008)',
   },
   conditions: {
-    courseM: { label: 'Course length', type: 'number', unit: 'm', default: 30, onDifference: 'blocks' },
+    courseM,
     walks,
     oxygenLpm,
     aid,
@@ -109,7 +126,8 @@ export const sitToStandOneMinute = defineMeasure({
   direction: 'higher',
   importantDifference: {
     value: 3,
-    source: 'Published as 1.9, 2.5 or 3.1 repetitions by method; the largest, whole number is used',
+    source: 'Vaidya 2016, Int J Chron Obstruct Pulmon Dis 11:2609; from memory, check before clinical use',
+    note: 'Published as 1.9, 2.5 or 3.1 repetitions by method; three whole repetitions are used',
   },
   conditions: { oxygenLpm },
   axisFrom: 0,

@@ -16,11 +16,12 @@ export const phq9 = defineMeasure({
   loinc: '44261-6',
   codeNote: 'To be checked at loinc.org',
   absolute: { min: 0, max: 27 },
-  importantDifference: { value: 5, source: 'Published as 5 points; from memory, check before clinical use' },
+  importantDifference: { value: 5, source: 'Löwe 2004, Med Care 42:1194; from memory, check before clinical use' },
   safetyItem: {
     label: 'Ninth answer',
     choices: ['0', '1', '2', '3', 'not-answered'],
     positiveFrom: 1,
+    maxOfOthers: 24,
     source: 'Rule OM-1: any positive ninth answer is a safety matter, whatever the total',
   },
   hint: 'Enter the total and, by itself, the ninth answer.',
@@ -34,7 +35,10 @@ export const gad7 = defineMeasure({
   loinc: '70274-6',
   codeNote: 'To be checked at loinc.org',
   absolute: { min: 0, max: 21 },
-  importantDifference: { value: 4, source: 'Published as 4 points; from memory, check before clinical use' },
+  importantDifference: {
+    value: 4,
+    source: 'Toussaint 2020, J Affect Disord 265:395; from memory, check before clinical use',
+  },
 });
 
 const hads = {

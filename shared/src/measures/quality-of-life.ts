@@ -11,7 +11,10 @@ export const cat = defineMeasure({
   shortLabel: 'CAT',
   absolute: { min: 0, max: 40 },
   direction: 'lower',
-  importantDifference: { value: 2, source: 'Published as 2 points; from memory, check before clinical use' },
+  importantDifference: {
+    value: 2,
+    source: 'Kon 2014, Lancet Respir Med 2:195; from memory, check before clinical use',
+  },
   gradingRules: ['default'],
   defaultGradingRule: 'default',
   patientMayEnter: true,

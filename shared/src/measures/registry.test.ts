@@ -40,6 +40,10 @@ describe('the measure registry', () => {
     for (const condition of Object.values(measure.conditions)) {
       if (condition.type === 'choice') expect(condition.choiceLabels).toHaveLength(condition.choices?.length ?? 0);
       if (condition.default !== null && condition.choices) expect(condition.choices).toContain(condition.default);
+      if (condition.range && typeof condition.default === 'number') {
+        expect(condition.default).toBeGreaterThanOrEqual(condition.range.min);
+        expect(condition.default).toBeLessThanOrEqual(condition.range.max);
+      }
     }
     if (measure.entry === 'single' || measure.entry === 'spirometry-form') expect(measure.absolute).not.toBeNull();
   });
@@ -135,6 +139,10 @@ describe('checkValue', () => {
 
   it('speaks in the words of the form', () => {
     expect(checkValue('fev1', 9)).toEqual({ problem: 'absolute', message: 'FEV1 must be 0.10 to 8.00 L' });
+    expect(checkValue('mmrc', 5)).toEqual({
+      problem: 'absolute',
+      message: 'mMRC breathlessness grade must be 0 to 4',
+    });
     expect(checkValue('fev1', 6.5)).toEqual({
       question: '6.50 L is outside the usual 0.30 to 6.00 L. Is it right?',
     });

@@ -13,6 +13,10 @@ export interface Condition {
   /** Words for the choices, in the same order. */
   choiceLabels?: readonly string[];
   unit?: string;
+  /** Numbers only: outside it is refused. */
+  range?: Range;
+  /** Numbers only. */
+  whole?: true;
   /** Used when nothing is said; null leaves the condition not stated. */
   default: number | boolean | string | null;
   /** `blocks`: results that differ are never compared. `notes`: they are, with a note. */
@@ -70,6 +74,8 @@ export interface SafetyItem {
   choices: readonly string[];
   /** Answers from this number on are positive. */
   positiveFrom: number;
+  /** The most the other answers can add up to; with this answer it bounds the total. */
+  maxOfOthers: number;
   source: string;
 }
 
