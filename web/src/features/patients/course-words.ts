@@ -15,7 +15,10 @@ const words: Record<Course['status'], string> = {
 const dated: readonly Course['status'][] = ['planned', 'active'];
 
 /** One patient's course in a row: "Since Sep 14, 2026", "Completed". */
-export const courseWords = (course: Course | null): string => {
+export const courseWords = (course: Course | null, today: string): string => {
   if (!course) return 'Not enrolled';
-  return dated.includes(course.status) ? `${words[course.status]} ${formatDate(course.startOn)}` : words[course.status];
+  if (!dated.includes(course.status)) return words[course.status];
+  // A planned start that has passed has not happened.
+  const missed = course.status === 'planned' && course.startOn < today;
+  return `${missed ? 'Planned,' : words[course.status]} ${formatDate(course.startOn)}`;
 };

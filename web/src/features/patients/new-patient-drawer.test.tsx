@@ -1,9 +1,11 @@
 import { screen, waitFor, within } from '@testing-library/react';
+import { http, HttpResponse } from 'msw';
 import { beforeEach, describe, expect, it } from 'vitest';
 import { answer } from '../../testing/answer';
 import { coordinator, createdPatient, listed } from '../../testing/people';
 import { problem } from '../../testing/problem';
 import { renderApp } from '../../testing/render-app';
+import { server } from '../../testing/server';
 
 const id = '00000000-0000-4000-8000-000000000777';
 
@@ -68,24 +70,59 @@ describe('new patient', () => {
     await waitFor(() => expect(screen.getByRole('radio', { name: 'Female' })).toHaveFocus());
   });
 
-  it('asks about someone with the same name and birth date, and never blocks saving', async () => {
+  it('goes to the open question instead of saving; someone else lets it through', async () => {
     const known = { ...createdPatient(id), id: listed(5).id, recordNumber: 'A-5' };
     const checks = answer('POST /api/patients/duplicate-check', { items: [known] });
     const seen = answer('POST /api/patients', { patient: createdPatient(id) });
-    const { user } = renderApp('/patients/new', coordinator);
+    const { user, address } = renderApp('/patients/new', coordinator);
     await fillIn(user);
     expect(await screen.findByText('Is this Ruth Valdane, born May 17, 1961, record A-5?')).toBeVisible();
     expect(checks.at(-1)?.body).toEqual({ givenName: 'Ruth', familyName: 'Valdane', birthDate: '1961-05-17' });
     await user.click(screen.getByRole('button', { name: 'Save patient' }));
-    await waitFor(() => expect(seen).toHaveLength(1));
+    const question = screen.getByRole('group', { name: 'A patient with this name and birth date' });
+    await waitFor(() => expect(question).toHaveFocus());
+    expect(seen).toHaveLength(0);
+    await user.click(within(question).getByRole('button', { name: 'Someone else' }));
+    expect(screen.queryByText(/Is this Ruth/)).not.toBeInTheDocument();
+    expect(screen.getByLabelText('Diagnosis group')).toHaveFocus();
+    await user.click(screen.getByRole('button', { name: 'Save patient' }));
+    await waitFor(() => expect(address()).toMatch(`/patients/${id}`));
+    expect(seen).toHaveLength(1);
   });
 
-  it('lets the question go when it is someone else', async () => {
-    answer('POST /api/patients/duplicate-check', { items: [{ ...createdPatient(id), id: listed(5).id }] });
+  it('waits for a check that has not answered yet', async () => {
+    const known = { ...createdPatient(id), id: listed(5).id };
+    const checks: Promise<unknown>[] = [];
+    let letAnswer = (): void => undefined;
+    const held = new Promise<void>((resolve) => (letAnswer = resolve));
+    server.use(
+      http.post('*/api/patients/duplicate-check', async () => {
+        checks.push(held);
+        await held;
+        return HttpResponse.json({ items: [known] });
+      }),
+    );
+    const seen = answer('POST /api/patients', { patient: createdPatient(id) });
     const { user } = renderApp('/patients/new', coordinator);
     await fillIn(user);
-    await user.click(await screen.findByRole('button', { name: 'Someone else' }));
-    expect(screen.queryByText(/Is this Ruth/)).not.toBeInTheDocument();
+    await user.click(screen.getByRole('button', { name: 'Save patient' }));
+    expect(await screen.findByRole('button', { name: 'Saving' })).toBeVisible();
+    expect(checks.length).toBeGreaterThan(0);
+    expect(seen).toHaveLength(0);
+    letAnswer();
+    const question = await screen.findByRole('group', { name: 'A patient with this name and birth date' });
+    await waitFor(() => expect(question).toHaveFocus());
+    expect(screen.getByRole('button', { name: 'Save patient' })).toBeVisible();
+    expect(seen).toHaveLength(0);
+  });
+
+  it('saves when the check fails', async () => {
+    answer('POST /api/patients/duplicate-check', 'unreachable');
+    const seen = answer('POST /api/patients', { patient: createdPatient(id) });
+    const { user } = renderApp('/patients/new', coordinator);
+    await fillIn(user);
+    await user.click(screen.getByRole('button', { name: 'Save patient' }));
+    await waitFor(() => expect(seen).toHaveLength(1));
   });
 
   it("puts the server's messages at their fields", async () => {

@@ -13,6 +13,7 @@ import { clinicDateOf } from '../../lib/clinic-time';
 import { choicesOf } from '../../lib/labels';
 import { usePageTitle } from '../../lib/page-title';
 import { useClinicZone } from '../../lib/session';
+import { sexWords } from '../../lib/sex-words';
 import { Button } from '../../ui/button';
 import { DateInput } from '../../ui/date-input';
 import { Drawer } from '../../ui/drawer';
@@ -37,10 +38,7 @@ const fields = [
   'phone',
 ] as const;
 
-const sexes: { value: SexForPrediction; label: string }[] = [
-  { value: 'female', label: 'Female' },
-  { value: 'male', label: 'Male' },
-];
+const sexes = choicesOf<SexForPrediction>(['female', 'male'], sexWords);
 
 export const Component = () => {
   usePageTitle('New patient');
@@ -49,21 +47,20 @@ export const Component = () => {
   const { search } = useLocation();
   const timeZone = useClinicZone();
   const [id] = useState(() => crypto.randomUUID());
-  const [dismissed, setDismissed] = useState<string>();
   const [problem, setProblem] = useState<string | null>(null);
   const create = useCreatePatient();
-  const { register, control, handleSubmit, setError, formState } = useForm({
+  const { register, control, handleSubmit, setError, setFocus, formState } = useForm({
     resolver: zodResolver(patientCreate),
     defaultValues: { id, givenName: '', familyName: '', birthDate: '', recordNumber: '', email: '', phone: '' },
   });
   const { errors, isDirty } = formState;
   const work = useUnsavedWork(isDirty);
   const [givenName, familyName, birthDate] = useWatch({ control, name: ['givenName', 'familyName', 'birthDate'] });
-  const known = useDuplicateCheck(givenName, familyName, birthDate).filter((patient) => patient.id !== id);
-  const question = known[0] && known[0].id !== dismissed ? known[0] : null;
+  const duplicates = useDuplicateCheck({ givenName, familyName, birthDate }, id);
 
-  const save = handleSubmit((body) => {
+  const save = handleSubmit(async (body) => {
     setProblem(null);
+    if (!(await duplicates.mayGoOn())) return;
     create.mutate(body, {
       onSuccess: (patient) => {
         work.release();
@@ -82,7 +79,7 @@ export const Component = () => {
       foot={
         <>
           <FormProblem>{problem}</FormProblem>
-          <Button kind="main" type="submit" form={formId} saving={create.isPending}>
+          <Button kind="main" type="submit" form={formId} saving={create.isPending || duplicates.waiting}>
             Save patient
           </Button>
         </>
@@ -121,14 +118,16 @@ export const Component = () => {
             />
           )}
         />
-        {question && (
-          <div className="row:col-span-2">
-            <DuplicateQuestion
-              known={question}
-              others={known.length - 1}
-              onSomeoneElse={() => setDismissed(question.id)}
-            />
-          </div>
+        {duplicates.question && (
+          <DuplicateQuestion
+            known={duplicates.question}
+            others={duplicates.others}
+            place={duplicates.place}
+            onSomeoneElse={() => {
+              duplicates.someoneElse();
+              setFocus('diagnosisGroup');
+            }}
+          />
         )}
         <Controller
           control={control}
