@@ -49,7 +49,7 @@ describe('what the spirometry form refuses and asks', () => {
     expect(await testsOf(page, id)).toEqual([]);
 
     await drawer.getByLabel('Date and time').fill(`${clinicDay(1)}T09:00`);
-    await drawer.getByRole('button', { name: 'Try again' }).click();
+    await drawer.getByRole('button', { name: 'Save test' }).click();
     await savedNote(page, /^Saved\. /);
     expect(await testsOf(page, id)).toHaveLength(1);
   });

@@ -10,4 +10,6 @@ export interface RecordDrawerProps {
   patient: Patient;
   onClose: () => void;
   onSaved: (saved: Saved) => void;
+  /** The drawer closed with a draft, kept at this instant. */
+  onKept?: (at: string) => void;
 }

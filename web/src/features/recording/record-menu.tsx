@@ -1,6 +1,8 @@
 import { lazy, Suspense, useEffect, useRef, useState } from 'react';
 import type { Patient } from '@slighthill/shared/contracts/patient';
-import { Link } from 'react-router-dom';
+import { Link, useLocation } from 'react-router-dom';
+import { formatTime } from '../../lib/clinic-time';
+import { useClinicZone } from '../../lib/session';
 import { Button } from '../../ui/button';
 import { Icon } from '../../ui/icon';
 import { Menu, type MenuItem } from '../../ui/menu';
@@ -23,6 +25,28 @@ const titles: Record<DrawerName, string> = {
   file: 'Enter in the file',
 };
 
+/** What became of the last entry, and the page it is said on: it goes with the next one. */
+type Note = { place: string } & ({ kind: 'saved'; saved: Saved } | { kind: 'kept'; at: string });
+
+const NoteWords = ({ note }: { note: Note }) => {
+  const timeZone = useClinicZone();
+  if (note.kind === 'kept')
+    return (
+      <span className="text-ink">
+        <span className="font-semibold">{`Draft kept ${formatTime(note.at, timeZone)}.`}</span>{' '}
+        <span className="text-ink-soft">Not in the record yet.</span>
+      </span>
+    );
+  return (
+    <span>
+      {`Saved. ${note.saved.words}.`}{' '}
+      <Link to={note.saved.to} className="link">
+        Show it
+      </Link>
+    </span>
+  );
+};
+
 interface RecordMenuProps {
   patient: Patient;
 }
@@ -30,7 +54,9 @@ interface RecordMenuProps {
 /** The Record button of a patient's header and the drawers it opens; says where a saved entry went. */
 export const RecordMenu = ({ patient }: RecordMenuProps) => {
   const [open, setOpen] = useState<DrawerName | null>(null);
-  const [saved, setSaved] = useState<Saved | null>(null);
+  const [lastNote, setNote] = useState<Note | null>(null);
+  const { key: place } = useLocation();
+  const note = lastNote?.place === place ? lastNote : null;
   const button = useRef<HTMLButtonElement>(null);
   const wasOpen = useRef(false);
   useEffect(() => {
@@ -52,7 +78,7 @@ export const RecordMenu = ({ patient }: RecordMenuProps) => {
     note,
     ...(icon ? { icon } : {}),
     onSelect: () => {
-      setSaved(null);
+      setNote(null);
       setOpen(name);
     },
   });
@@ -71,15 +97,10 @@ export const RecordMenu = ({ patient }: RecordMenuProps) => {
   return (
     <div className="flex flex-wrap items-center justify-end gap-y-1">
       <p role="status" className="text-note">
-        {saved && (
+        {note && (
           <span className="mr-3 flex items-center gap-2 text-fern">
             <Icon name="check" size={18} />
-            <span>
-              {`Saved. ${saved.words}.`}{' '}
-              <Link to={saved.to} onClick={() => setSaved(null)} className="link">
-                Show it
-              </Link>
-            </span>
+            <NoteWords note={note} />
           </span>
         )}
       </p>
@@ -97,9 +118,10 @@ export const RecordMenu = ({ patient }: RecordMenuProps) => {
             patient={patient}
             onClose={() => setOpen(null)}
             onSaved={(next) => {
-              setSaved(next);
+              setNote({ kind: 'saved', saved: next, place });
               setOpen(null);
             }}
+            onKept={(at) => setNote({ kind: 'kept', at, place })}
           />
         </Suspense>
       )}

@@ -17,7 +17,7 @@ interface BodySizeFormDrawerProps extends RecordDrawerProps {
 }
 
 export const BodySizeFormDrawer = (props: BodySizeFormDrawerProps) => {
-  const { patient, start, restoredAt, onStartOver, onClose, onSaved } = props;
+  const { patient, start, restoredAt, onStartOver, onClose, onSaved, onKept } = props;
   const timeZone = useClinicZone();
   const earlier = { heightCm: lastHeight(patient.bodySize), weightKg: lastWeight(patient.bodySize) };
   const check = useCallback((form: BodySizeForm) => checkBodySize(form, timeZone).issues, [timeZone]);
@@ -44,10 +44,11 @@ export const BodySizeFormDrawer = (props: BodySizeFormDrawerProps) => {
         patient={patient}
         drawer={drawer}
         openQuestions={state.questions.length}
-        saveLabel={drawer.problem ? 'Try again' : 'Save body size'}
+        saveLabel={drawer.mayRetry ? 'Try again' : 'Save body size'}
         keepsDraft
         onStartOver={restoredAt ? onStartOver : undefined}
         onClose={onClose}
+        onKept={onKept}
       >
         <BodySizeBody state={state} earlierHeight={earlier.heightCm} />
       </RecordFrame>

@@ -25,7 +25,7 @@ export const fileServerPath = (path: string): string | null => {
 };
 
 export const FileEntryFormDrawer = (props: FileEntryFormDrawerProps) => {
-  const { patient, start, restoredAt, onStartOver, onClose, onSaved } = props;
+  const { patient, start, restoredAt, onStartOver, onClose, onSaved, onKept } = props;
   const timeZone = useClinicZone();
   const check = useCallback((form: FileForm) => checkFileEntry(form, timeZone).issues, [timeZone]);
   const state = useRecordForm({ start, check, ask: noQuestions });
@@ -51,10 +51,11 @@ export const FileEntryFormDrawer = (props: FileEntryFormDrawerProps) => {
         patient={patient}
         drawer={drawer}
         openQuestions={0}
-        saveLabel={drawer.problem ? 'Try again' : 'Save entry'}
+        saveLabel={drawer.mayRetry ? 'Try again' : 'Save entry'}
         keepsDraft
         onStartOver={restoredAt ? onStartOver : undefined}
         onClose={onClose}
+        onKept={onKept}
       >
         <FileEntryBody patient={patient} values={state.values} amending={false} />
       </RecordFrame>

@@ -16,6 +16,8 @@ interface RecordFrameProps {
   /** Offered while a restored draft is on the screen. */
   onStartOver?: (() => void) | undefined;
   onClose: () => void;
+  /** Closed with a draft, kept at this instant. */
+  onKept?: ((at: string) => void) | undefined;
   /** A further button before Save. */
   extra?: ReactNode;
   children: ReactNode;
@@ -31,6 +33,7 @@ export const RecordFrame = ({
   keepsDraft,
   onStartOver,
   onClose,
+  onKept,
   extra,
   children,
 }: RecordFrameProps) => {
@@ -42,7 +45,10 @@ export const RecordFrame = ({
     onStartOver?.();
   };
   const keep = async (): Promise<void> => {
-    if (await drawer.keep()) onClose();
+    const { mayClose, keptAt } = await drawer.keep();
+    if (!mayClose) return;
+    onClose();
+    if (keptAt !== null) onKept?.(keptAt);
   };
   return (
     <Drawer

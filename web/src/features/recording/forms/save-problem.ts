@@ -35,3 +35,7 @@ export const saveProblem = (
 };
 
 export const isStale = (error: unknown): boolean => error instanceof ApiProblem && isType(error, 'stale-version');
+
+/** A lost connection or a fault of the server passes by itself; any other answer wants something changed first. */
+export const mayWorkAgain = (error: unknown): boolean =>
+  !(error instanceof ApiProblem) || error.isUnreachable || error.status >= 500 || error.status === 429;

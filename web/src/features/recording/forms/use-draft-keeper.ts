@@ -10,7 +10,8 @@ export interface DraftKeeper {
   state: DraftState;
   /** True while what is on the screen lies on the server as a draft. */
   current: boolean;
-  keepNow: () => Promise<boolean>;
+  /** When it was kept; null when that failed. */
+  keepNow: () => Promise<string | null>;
   /** Takes the draft away; nothing more is kept, unless another entry follows in the same drawer. */
   discard: (another?: boolean) => Promise<void>;
 }
@@ -35,18 +36,19 @@ export const useDraftKeeper = ({ form, subject, values, enabled, restoredAt }: D
   const ended = useRef(false);
 
   const keep = useCallback(
-    (content: string): Promise<boolean> => {
+    (content: string): Promise<string | null> => {
       const next = queue.current.then(async () => {
-        if (ended.current) return false;
+        if (ended.current) return null;
         try {
           const body = { content: JSON.parse(content) as unknown };
           const answer = await apiFetch<{ draft: Draft | null } | undefined>(path, { method: 'PUT', body });
           setKeptText(content);
-          setState({ kind: 'kept', at: answer?.draft?.savedAt ?? new Date().toISOString() });
-          return true;
+          const at = answer?.draft?.savedAt ?? new Date().toISOString();
+          setState({ kind: 'kept', at });
+          return at;
         } catch {
           setState({ kind: 'failed' });
-          return false;
+          return null;
         }
       });
       queue.current = next;

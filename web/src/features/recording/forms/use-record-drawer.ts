@@ -4,7 +4,7 @@ import type { FieldPath } from 'react-hook-form';
 import { useUnsavedWork, type UnsavedWork } from '../../../ui/use-unsaved-work';
 import { useSaveAboutPatient } from '../mutations';
 import type { FormIssue } from './form-issues';
-import { isStale, saveProblem } from './save-problem';
+import { isStale, mayWorkAgain, saveProblem } from './save-problem';
 import { useDraftKeeper, type DraftKeeper } from './use-draft-keeper';
 import type { AskingForm, RecordFormState } from './use-record-form';
 
@@ -39,8 +39,10 @@ export interface RecordDrawerState {
   saving: boolean;
   submit: (event?: FormEvent) => void;
   submitAndGoOn: () => void;
-  /** Keeps the draft and says whether the drawer may close. */
-  keep: () => Promise<boolean>;
+  /** The same again may work: nothing typed stands against it. */
+  mayRetry: boolean;
+  /** Keeps the draft; says whether the drawer may close and when there is a draft since. */
+  keep: () => Promise<{ mayClose: boolean; keptAt: string | null }>;
 }
 
 /** What every drawer does: keep a draft, go to what is open, save once, and lose nothing when saving fails. */
@@ -61,6 +63,7 @@ export const useRecordDrawer = <Form extends AskingForm, Answer>(
   } = source;
   const { form, values, goTo } = state;
   const [problem, setProblem] = useState<string | null>(null);
+  const [mayRetry, setMayRetry] = useState(false);
   const typedSomething = form.formState.isDirty;
   const draft = useDraftKeeper({
     form: draftForm ?? 'measurement',
@@ -73,6 +76,7 @@ export const useRecordDrawer = <Form extends AskingForm, Answer>(
   const save = useSaveAboutPatient<Answer>(patientId);
 
   const fail = (error: unknown, toFormPath: SendRequest['toFormPath']): void => {
+    setMayRetry(mayWorkAgain(error));
     if (isStale(error)) {
       setProblem(`Not saved. Someone changed this since you opened it. Your ${kept} are here.`);
       onStale?.();
@@ -102,6 +106,7 @@ export const useRecordDrawer = <Form extends AskingForm, Answer>(
     const [open] = state.openNow();
     if (open) return goTo(open.field);
     setProblem(null);
+    setMayRetry(false);
     const { path, body, toFormPath } = request(form.getValues());
     save.mutate(
       { path, body },
@@ -119,15 +124,17 @@ export const useRecordDrawer = <Form extends AskingForm, Answer>(
 
   return {
     problem,
+    mayRetry,
     draft,
     work,
     saving: save.isPending,
     submit: (event) => void form.handleSubmit(() => send(finish), refuse)(event),
     submitAndGoOn: () => void form.handleSubmit(() => send(goOn), refuse)(),
     keep: async () => {
-      const mayClose = !typedSomething || (await draft.keepNow());
+      const keptAt = typedSomething ? await draft.keepNow() : restoredAt;
+      const mayClose = !typedSomething || keptAt !== null;
       if (mayClose) work.release();
-      return mayClose;
+      return { mayClose, keptAt };
     },
   };
 };

@@ -33,7 +33,7 @@ const resultWords = ({ measure, value }: Measurement): string => {
 
 /** One result after another, in one sitting. */
 export const ResultFormDrawer = (props: ResultFormDrawerProps) => {
-  const { patient, start, restoredAt, onStartOver, onClose, onSaved } = props;
+  const { patient, start, restoredAt, onStartOver, onClose, onSaved, onKept } = props;
   const timeZone = useClinicZone();
   const [sitting, setSitting] = useState<readonly string[]>([]);
   const tests = useQuery(recentTestsQuery(patient.id)).data ?? [];
@@ -75,10 +75,11 @@ export const ResultFormDrawer = (props: ResultFormDrawerProps) => {
         patient={patient}
         drawer={drawer}
         openQuestions={state.questions.length}
-        saveLabel={drawer.problem ? 'Try again' : 'Save result'}
+        saveLabel={drawer.mayRetry ? 'Try again' : 'Save result'}
         keepsDraft
         onStartOver={restoredAt ? onStartOver : undefined}
         onClose={onClose}
+        onKept={onKept}
         extra={<Button onClick={drawer.submitAndGoOn}>Save and add another</Button>}
       >
         <p role="status" className="flex items-center gap-2 text-note text-fern empty:-mb-4">

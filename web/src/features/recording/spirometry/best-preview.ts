@@ -31,14 +31,7 @@ const ratioOf = (fev1: number | null, fvc: number | null): number | null =>
 export const bestPreview = (set: TestSet): BestPreview => {
   if (set.entry === 'best') {
     const [fev1, fvc, pef] = [typed(set.best.fev1), typed(set.best.fvc), typed(set.best.pef)];
-    return {
-      fev1,
-      fvc,
-      fev1fvc: ratioOf(fev1, fvc),
-      pef,
-      fev1Row: null,
-      fvcRow: null,
-    };
+    return { fev1, fvc, fev1fvc: ratioOf(fev1, fvc), pef, fev1Row: null, fvcRow: null };
   }
   const fev1s: Candidate[] = [];
   const fvcs: Candidate[] = [];

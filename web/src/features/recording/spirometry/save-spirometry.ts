@@ -22,9 +22,6 @@ export const serverPath = (path: string, { tests }: CheckedSpirometry): string |
 export const savedSpirometry = (answer: SpirometryAnswer, patientId: string): Saved => {
   const tests = `/patients/${patientId}/tests`;
   return 'test' in answer
-    ? {
-        words: 'Spirometry is in Tests',
-        to: `${tests}/spirometry-test/${answer.test.id}`,
-      }
+    ? { words: 'Spirometry is in Tests', to: `${tests}/spirometry-test/${answer.test.id}` }
     : { words: 'Spirometry before and after is in Tests', to: tests };
 };

@@ -187,6 +187,7 @@ describe('the spirometry drawer', () => {
       await screen.findByText('Not saved. Your numbers are here. The server could not be reached. Try again.'),
     ).toBeVisible();
     expect(cell(1, 'FEV1 in L')).toHaveValue('1.38');
+    expect(screen.getByRole('button', { name: 'Try again' })).toBeVisible();
     await save();
     await waitFor(() => expect(onSaved).toHaveBeenCalledOnce());
     expect(sent[1]?.body?.id).toBe(sent[0]?.body?.id);
@@ -210,6 +211,8 @@ describe('the spirometry drawer', () => {
     expect(await screen.findByText('Maneuver 3: Too far from the others')).toBeVisible();
     expect(screen.getByText('Not saved. Your numbers are here. See the marked fields.')).toBeVisible();
     expect(cell(3, 'FVC in L')).toHaveFocus();
+    // A field must change first, so trying the same again is not what the button offers.
+    expect(screen.getByRole('button', { name: 'Save test' })).toBeVisible();
     await user.keyboard('{End}5');
     await waitFor(() => expect(screen.queryByText('Maneuver 3: Too far from the others')).not.toBeInTheDocument());
   });

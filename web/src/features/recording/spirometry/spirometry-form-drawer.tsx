@@ -20,7 +20,7 @@ interface SpirometryFormDrawerProps extends RecordDrawerProps {
 
 /** A new test, or one before and one after bronchodilator. */
 export const SpirometryFormDrawer = (props: SpirometryFormDrawerProps) => {
-  const { patient, start, restoredAt, onStartOver, onClose, onSaved } = props;
+  const { patient, start, restoredAt, onStartOver, onClose, onSaved, onKept } = props;
   const timeZone = useClinicZone();
   const earlier = spirometryEarlier(patient, useQuery(recentTestsQuery(patient.id)).data ?? []);
   const state = useSpirometryForm(start, earlier);
@@ -48,10 +48,11 @@ export const SpirometryFormDrawer = (props: SpirometryFormDrawerProps) => {
         patient={patient}
         drawer={drawer}
         openQuestions={state.questions.length}
-        saveLabel={drawer.problem ? 'Try again' : 'Save test'}
+        saveLabel={drawer.mayRetry ? 'Try again' : 'Save test'}
         keepsDraft
         onStartOver={restoredAt ? onStartOver : undefined}
         onClose={onClose}
+        onKept={onKept}
       >
         <SpirometryBody state={state} patient={patient} earlierHeight={earlier.heightCm} amending={false} />
       </RecordFrame>

@@ -14,12 +14,7 @@ const blowRow = z.object({
   reason: z.string(),
 });
 
-const bestRow = z.object({
-  fev1: z.string(),
-  fvc: z.string(),
-  pef: z.string(),
-  fef2575: z.string(),
-});
+const bestRow = z.object({ fev1: z.string(), fvc: z.string(), pef: z.string(), fef2575: z.string() });
 
 const testSet = z.object({
   entry: z.enum(['maneuvers', 'best']),

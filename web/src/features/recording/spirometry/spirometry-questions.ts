@@ -63,10 +63,7 @@ const setQuestions = (
   ];
 };
 
-const setWords: Record<SetName, string> = {
-  before: 'Before, ',
-  after: 'After, ',
-};
+const setWords: Record<SetName, string> = { before: 'Before, ', after: 'After, ' };
 const upperFirst = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
 
 /** Everything the form asks, in the order of its fields. */

@@ -29,19 +29,9 @@ export const useSpirometryForm = (
     const set = setOfField(field);
     if (set) setTab(set);
   }, []);
-  const state = useRecordForm({
-    start,
-    check,
-    ask: (form) => spirometryQuestions(form, earlier),
-    reveal,
-  });
+  const state = useRecordForm({ start, check, ask: (form) => spirometryQuestions(form, earlier), reveal });
   const shown = setsOf(state.values.state);
-  return {
-    ...state,
-    tab: shown.includes(chosen) ? chosen : shown[0]!,
-    setTab,
-    check,
-  };
+  return { ...state, tab: shown.includes(chosen) ? chosen : shown[0]!, setTab, check };
 };
 
 const noFurther = (): readonly FormIssue[] => [];
