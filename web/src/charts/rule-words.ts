@@ -1,3 +1,5 @@
+import { fev1RuleChoices, tlcRuleChoices } from '../lib/rule-words';
+
 /** Names of reference sets and rules as screens print them. */
 export const referenceSetLabels: Readonly<Record<string, string>> = {
   'gli-global-2022': 'GLI Global 2022',
@@ -9,10 +11,7 @@ export const referenceSetLabels: Readonly<Record<string, string>> = {
 };
 
 export const gradingRuleLabels: Readonly<Record<string, string>> = {
-  'ats-ers-2005': 'ATS/ERS 2005',
-  'ers-ats-2021': 'ERS/ATS 2021',
-  gold: 'GOLD',
-  'tlc-percent': 'TLC percent predicted',
+  ...Object.fromEntries([...tlcRuleChoices, ...fev1RuleChoices].map(({ value, label }) => [value, label])),
   'dlco-2005': 'ATS/ERS 2005 for transfer factor',
   default: 'the score’s own bands',
 };

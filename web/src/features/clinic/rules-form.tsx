@@ -3,6 +3,7 @@ import { clinicPatch, type Clinic } from '@slighthill/shared/contracts/clinic';
 import { useState } from 'react';
 import { Controller, useForm } from 'react-hook-form';
 import { applyProblem } from '../../lib/apply-problem';
+import { fev1RuleChoices, ratioRuleChoices, tlcRuleChoices } from '../../lib/rule-words';
 import { Button } from '../../ui/button';
 import { Field } from '../../ui/field';
 import { FormProblem } from '../../ui/form-problem';
@@ -13,7 +14,6 @@ import { TextInput } from '../../ui/text-input';
 import { UnsavedWorkDialog } from '../../ui/unsaved-work-dialog';
 import { useUnsavedWork } from '../../ui/use-unsaved-work';
 import { useChangeClinic } from './mutations';
-import { fev1Choices, ratioChoices, tlcChoices } from './rule-choices';
 
 interface RulesFormProps {
   clinic: Clinic;
@@ -75,7 +75,7 @@ export const RulesForm = ({ clinic, saved, onSaved }: RulesFormProps) => {
             <RadioGroup
               legend="Obstruction"
               arrange="list"
-              choices={ratioChoices}
+              choices={ratioRuleChoices}
               value={field.value ?? null}
               onValueChange={field.onChange}
             />
@@ -88,7 +88,7 @@ export const RulesForm = ({ clinic, saved, onSaved }: RulesFormProps) => {
             <RadioGroup
               legend="Severity of obstruction"
               arrange="list"
-              choices={fev1Choices}
+              choices={fev1RuleChoices}
               value={field.value ?? null}
               onValueChange={field.onChange}
             />
@@ -101,7 +101,7 @@ export const RulesForm = ({ clinic, saved, onSaved }: RulesFormProps) => {
             <RadioGroup
               legend="Severity of restriction"
               arrange="list"
-              choices={tlcChoices}
+              choices={tlcRuleChoices}
               value={field.value ?? null}
               onValueChange={field.onChange}
             />

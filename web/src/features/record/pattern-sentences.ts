@@ -4,6 +4,8 @@ import { getMeasure, isMeasureId } from '@slighthill/shared/measures';
 import { limitWords } from '../../charts/band-strips';
 import { gradingRuleLabel, referenceSetLabel, stateWords } from '../../charts/rule-words';
 import { formatDate } from '../../lib/clinic-time';
+import { referenceGroupLabel } from '../../lib/rule-words';
+import type { TrendRules } from './queries';
 
 type Pattern = NonNullable<TrendPattern>;
 
@@ -67,15 +69,21 @@ const severitySentence = ({ severity }: Pattern, trends: TrendResponse): string 
   return `${by}, ${name}${quantityWords[band.quantity]}, ${severity.label} is ${limits}.`;
 };
 
+/** A legacy set is always named with the group it was looked at with. */
+const setWords = (referenceSet: string, asked: TrendRules): string => {
+  const group = asked.referenceSet === referenceSet ? asked.group : null;
+  return `${referenceSetLabel(referenceSet)}${group === null ? '' : `, group ${referenceGroupLabel(group)}`}`;
+};
+
 /** Which rules, which test and which equations produced the pattern. */
-export const rulesSentence = (pattern: Pattern, trends: TrendResponse): string => {
+export const rulesSentence = (pattern: Pattern, trends: TrendResponse, asked: TrendRules): string => {
   const { ratioRule, lowByFixedRatio, lowByLln, values } = pattern;
   const [own, other] = ratioRule === 'lln' ? ['LLN', 'fixed ratio 0.70'] : ['fixed ratio 0.70', 'LLN'];
   const agreement =
     lowByLln === null || lowByFixedRatio === null
       ? ''
       : `, ${other} ${lowByFixedRatio === lowByLln ? 'agrees' : 'does not agree'}`;
-  const test = `Test of ${formatDate(values.takenOn)}, ${stateWords[values.state]}, ${referenceSetLabel(values.referenceSet)}.`;
+  const test = `Test of ${formatDate(values.takenOn)}, ${stateWords[values.state]}, ${setWords(values.referenceSet, asked)}.`;
   return [`Pattern by ${own}${agreement}.`, severitySentence(pattern, trends), test, ...pattern.notes]
     .filter((sentence) => sentence !== '')
     .join(' ');

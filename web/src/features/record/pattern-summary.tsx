@@ -1,6 +1,7 @@
-import { lazy, Suspense, useState } from 'react';
+import { lazy, Suspense, useRef, useState } from 'react';
 import type { TrendResponse } from '@slighthill/shared/contracts/trend';
 import { numbersSentence, rulesSentence } from './pattern-sentences';
+import { useFocusBack } from './use-focus-back';
 import type { SummaryView } from './use-summary-view';
 
 const RuleDialog = lazy(() => import('./rule-dialog').then((module) => ({ default: module.RuleDialog })));
@@ -15,6 +16,8 @@ const clinicRules = { referenceSet: null, group: null, gradingRule: null, ratioR
 /** The pattern, then its numbers, then the rules that produced them, with a way to look by other rules. */
 export const PatternSummary = ({ trends, view }: PatternSummaryProps) => {
   const [choosing, setChoosing] = useState(false);
+  const changeRule = useRef<HTMLButtonElement>(null);
+  const focusBackTo = useFocusBack(choosing);
   const { pattern } = trends;
   const changed = Object.values(view.rules).some((value) => value !== null);
   return (
@@ -22,7 +25,9 @@ export const PatternSummary = ({ trends, view }: PatternSummaryProps) => {
       aria-label="Pattern"
       className="grid gap-x-6 gap-y-2 margin:grid-cols-[264px_minmax(0,1fr)] print:grid-cols-[180px_minmax(0,1fr)]"
     >
-      <h2 className="text-record">{pattern?.heading ?? 'No pattern yet'}</h2>
+      <h2 tabIndex={-1} className="text-record">
+        {pattern?.heading ?? 'No pattern yet'}
+      </h2>
       <div>
         {pattern ? (
           <p>
@@ -34,11 +39,15 @@ export const PatternSummary = ({ trends, view }: PatternSummaryProps) => {
           <p>A pattern needs a spirometry test with FEV1 and FVC that may be predicted.</p>
         )}
         <p className="mt-1 text-note text-ink-soft">
-          {pattern && `${rulesSentence(pattern, trends)} `}
+          {pattern && `${rulesSentence(pattern, trends, view.rules)} `}
           <button
+            ref={changeRule}
             type="button"
             data-print="hide"
-            onClick={() => setChoosing(true)}
+            onClick={({ currentTarget }) => {
+              focusBackTo(currentTarget);
+              setChoosing(true);
+            }}
             className="link -my-1 inline-flex min-h-6 items-center"
           >
             Change rule
@@ -50,7 +59,10 @@ export const PatternSummary = ({ trends, view }: PatternSummaryProps) => {
             <button
               type="button"
               data-print="hide"
-              onClick={() => view.changeRules(clinicRules)}
+              onClick={() => {
+                view.changeRules(clinicRules);
+                changeRule.current?.focus();
+              }}
               className="link inline-flex min-h-6 items-center"
             >
               Back to the clinic’s rules

@@ -1,7 +1,8 @@
 import { useState } from 'react';
-import { fev1SeverityRules, ratioRules, referenceGroups } from '@slighthill/shared/vocabulary';
+import { referenceGroups } from '@slighthill/shared/vocabulary';
 import type { TrendPattern } from '@slighthill/shared/contracts/trend';
-import { gradingRuleLabel, referenceSetLabel } from '../../charts/rule-words';
+import { referenceSetLabel } from '../../charts/rule-words';
+import { fev1RuleChoices, ratioRuleChoices, referenceGroupLabel } from '../../lib/rule-words';
 import { useSessionUser } from '../../lib/session';
 import { Button } from '../../ui/button';
 import { Dialog } from '../../ui/dialog';
@@ -19,26 +20,6 @@ interface RuleDialogProps {
 
 const spirometrySets = ['gli-global-2022', 'gli-2012', 'nhanes-iii-1999'] as const;
 const usualSet = spirometrySets[0];
-
-const groupWords: Record<string, string> = {
-  caucasian: 'Caucasian',
-  'african-american': 'African American',
-  'north-east-asian': 'North East Asian',
-  'south-east-asian': 'South East Asian',
-  'mexican-american': 'Mexican American',
-  other: 'Other or mixed',
-};
-
-const ratioWords = {
-  'fixed-ratio': { label: 'Fixed ratio', hint: 'FEV1/FVC below 0.70' },
-  lln: { label: 'LLN', hint: 'FEV1/FVC below its lower limit of normal' },
-} as const;
-
-const severityHints: Record<(typeof fev1SeverityRules)[number], string> = {
-  'ats-ers-2005': 'FEV1 percent predicted, five bands',
-  'ers-ats-2021': 'z-score, three bands',
-  gold: 'FEV1 percent predicted, only for confirmed COPD after bronchodilator',
-};
 
 const groupsOf = (set: string): readonly string[] =>
   (referenceGroups as Readonly<Record<string, readonly string[]>>)[set] ?? [];
@@ -94,25 +75,16 @@ export const RuleDialog = ({ rules, pattern, onChoose, onClose }: RuleDialogProp
             legend="Ancestry group printed in this set"
             hint="Asked each time and not stored on the patient"
             error={asked && missing ? 'This set needs a group' : undefined}
-            choices={groups.map((id) => ({ value: id, label: groupWords[id] ?? id }))}
+            choices={groups.map((id) => ({ value: id, label: referenceGroupLabel(id) }))}
             value={group}
             onValueChange={setGroup}
           />
         )}
-        <RadioGroup
-          legend="Ratio rule"
-          choices={ratioRules.map((id) => ({ value: id as string, ...ratioWords[id] }))}
-          value={ratio}
-          onValueChange={setRatio}
-        />
-        <RadioGroup
+        <RadioGroup<string> legend="Ratio rule" choices={ratioRuleChoices} value={ratio} onValueChange={setRatio} />
+        <RadioGroup<string>
           legend="Grading rule"
           arrange="list"
-          choices={fev1SeverityRules.map((id) => ({
-            value: id as string,
-            label: gradingRuleLabel(id),
-            hint: severityHints[id],
-          }))}
+          choices={fev1RuleChoices}
           value={rule}
           onValueChange={setRule}
         />
