@@ -1,15 +1,19 @@
 import type { TrendSeries } from '@slighthill/shared/contracts/trend';
 import { getMeasure, isMeasureId } from '@slighthill/shared/measures';
 import { formatResult, formatValue } from '../../charts/format-measure';
+import { stateWords } from '../../charts/rule-words';
 import { formatDayMonth } from '../../lib/clinic-time';
 
 /** A change worth drawing: there is a pair, and the measure has a better direction. */
 export const hasChangeToShow = (series: TrendSeries): boolean =>
   series.latest !== null && isMeasureId(series.measure) && getMeasure(series.measure).direction !== 'none';
 
+/** The newest that may be compared stands for the series. */
+const shownPoint = ({ latest, baseline, points }: TrendSeries) => latest ?? baseline ?? points.at(-1);
+
 const resultWords = (series: TrendSeries): string => {
   const { baseline, latest, measure, unit } = series;
-  const last = latest ?? series.points.at(-1);
+  const last = shownPoint(series);
   if (!last) return 'no result';
   const shown = formatResult(measure, last.value, unit);
   return baseline && latest ? `${formatValue(measure, baseline.value)} to ${shown}` : shown;
@@ -18,9 +22,14 @@ const resultWords = (series: TrendSeries): string => {
 const dateWords = (series: TrendSeries): string => {
   const { baseline, latest } = series;
   if (baseline && latest) return `${formatDayMonth(baseline.takenOn)} to ${formatDayMonth(latest.takenOn)}`;
-  const last = series.points.at(-1);
+  const last = shownPoint(series);
   if (!last) return '';
   return series.points.length === 1 ? `once, ${formatDayMonth(last.takenOn)}` : formatDayMonth(last.takenOn);
+};
+
+const stateOf = (series: TrendSeries): string => {
+  const state = shownPoint(series)?.state ?? null;
+  return state === null ? '' : stateWords[state];
 };
 
 interface AlsoOnRecordProps {
@@ -46,7 +55,9 @@ export const AlsoOnRecord = ({ series, onChoose }: AlsoOnRecordProps) => {
                 {isMeasureId(one.measure) ? getMeasure(one.measure).shortLabel : one.measure}
               </span>
               <span className="grow">{resultWords(one)}</span>
-              <span className="text-note text-ink-soft">{dateWords(one)}</span>
+              <span className="text-note text-ink-soft">
+                {[stateOf(one), dateWords(one)].filter((words) => words !== '').join(', ')}
+              </span>
             </button>
           </li>
         ))}

@@ -11,7 +11,9 @@ interface DetailListProps {
 export const DetailList = ({ title, rows, empty, action }: DetailListProps) => (
   <section aria-label={title} className="mb-8">
     <div className="flex min-h-9 flex-wrap items-center justify-between gap-3 border-b border-rule pb-2">
-      <h2 className="text-section">{title}</h2>
+      <h2 tabIndex={-1} className="text-section">
+        {title}
+      </h2>
       <div data-print="hide">{action}</div>
     </div>
     {rows.length === 0 ? (

@@ -1,4 +1,5 @@
-import { lazy, Suspense, useState } from 'react';
+import { lazy, Suspense, useEffect, useRef, useState, type MouseEvent } from 'react';
+import { useLocation } from 'react-router-dom';
 import type { Patient } from '@slighthill/shared/contracts/patient';
 import { diagnosisGroupLabels, openEnrollmentStatuses } from '@slighthill/shared/vocabulary';
 import { formatNumber } from '@slighthill/shared/format';
@@ -7,8 +8,9 @@ import { usePageTitle } from '../../lib/page-title';
 import { Button } from '../../ui/button';
 import { SavedNote } from '../../ui/saved-note';
 import { DetailList } from './detail-list';
-import { enrollmentStatusLabels } from './record-words';
+import { enrollHash, enrollmentStatusLabels } from './record-words';
 import { useRecord } from './record-context';
+import { useFocusBack } from './use-focus-back';
 
 const EditPatientDrawer = lazy(() =>
   import('./edit-patient-drawer').then((module) => ({ default: module.EditPatientDrawer })),
@@ -62,21 +64,36 @@ const enrollmentRows = (enrollment: NonNullable<Patient['enrollment']>): [string
 const isOpen = (enrollment: Patient['enrollment']): boolean =>
   enrollment !== null && (openEnrollmentStatuses as readonly string[]).includes(enrollment.status);
 
+/** The header's "Not enrolled" leads here, to the button that changes it. */
+const useEnrollButton = () => {
+  const button = useRef<HTMLButtonElement>(null);
+  const { hash, key } = useLocation();
+  useEffect(() => {
+    if (hash === enrollHash) button.current?.focus();
+  }, [hash, key]);
+  return button;
+};
+
 /** Who the patient is and the course; changed by whoever may. */
 export const PatientDetails = () => {
   const { patient } = useRecord();
   const { enrollment } = patient;
   const [open, setOpen] = useState<Open>(null);
   const [saved, setSaved] = useState<string | null>(null);
+  const enroll = useEnrollButton();
+  const focusBackTo = useFocusBack(open !== null);
   const mayEnroll = patient.abilities.includes('enroll');
   const finish = (words: string): void => {
     setSaved(words);
     setOpen(null);
   };
-  const begin = (what: Open): void => {
-    setSaved(null);
-    setOpen(what);
-  };
+  const begin =
+    (what: Open) =>
+    ({ currentTarget }: MouseEvent<HTMLButtonElement>): void => {
+      focusBackTo(currentTarget);
+      setSaved(null);
+      setOpen(what);
+    };
   return (
     <>
       <SavedNote>{saved}</SavedNote>
@@ -85,7 +102,7 @@ export const PatientDetails = () => {
         rows={[...personRows(patient), ...bodyRows(patient)]}
         action={
           patient.abilities.includes('edit') && (
-            <Button icon="pen" size="row" onClick={() => begin('patient')}>
+            <Button icon="pen" size="row" onClick={begin('patient')}>
               Edit patient
             </Button>
           )
@@ -99,12 +116,12 @@ export const PatientDetails = () => {
           mayEnroll && (
             <span className="flex flex-wrap gap-2">
               {enrollment && isOpen(enrollment) && (
-                <Button icon="pen" size="row" onClick={() => begin('enrollment')}>
+                <Button icon="pen" size="row" onClick={begin('enrollment')}>
                   Change enrollment
                 </Button>
               )}
               {!isOpen(enrollment) && (
-                <Button kind="main" icon="plus" size="row" onClick={() => begin('enroll')}>
+                <Button ref={enroll} kind="main" icon="plus" size="row" onClick={begin('enroll')}>
                   Enroll in a program
                 </Button>
               )}

@@ -1,5 +1,5 @@
 import { Popover } from 'radix-ui';
-import { useState } from 'react';
+import { useEffect, useState } from 'react';
 import type { Flag, Patient } from '@slighthill/shared/contracts/patient';
 import { cx } from '../../ui/cx';
 import { Icon, type IconName } from '../../ui/icon';
@@ -8,6 +8,8 @@ import { FlagDetail } from './flag-detail';
 
 interface FlagChipsProps {
   patient: Pick<Patient, 'id' | 'openFlags' | 'abilities'>;
+  /** Takes the focus when the chip that had it is gone. */
+  onGone: () => void;
 }
 
 const looks: Record<Flag['severity'], { tone: string; icon: IconName }> = {
@@ -19,9 +21,10 @@ interface FlagChipProps {
   words: string;
   flags: readonly Flag[];
   patient: FlagChipsProps['patient'];
+  onResolved: (flagId: string) => void;
 }
 
-const FlagChip = ({ words, flags, patient }: FlagChipProps) => {
+const FlagChip = ({ words, flags, patient, onResolved }: FlagChipProps) => {
   const container = useOverlayRoot();
   const [open, setOpen] = useState(false);
   const { tone, icon } = looks[flags.some((flag) => flag.severity === 'safety') ? 'safety' : 'attention'];
@@ -50,7 +53,10 @@ const FlagChip = ({ words, flags, patient }: FlagChipProps) => {
               flag={flag}
               patientId={patient.id}
               canResolve={patient.abilities.includes('resolve-flag')}
-              onResolved={() => setOpen(false)}
+              onResolved={() => {
+                setOpen(false);
+                onResolved(flag.id);
+              }}
             />
           ))}
         </Popover.Content>
@@ -59,10 +65,26 @@ const FlagChip = ({ words, flags, patient }: FlagChipProps) => {
   );
 };
 
+/** A resolved flag's chip leaves the page with the focus in it. */
+const useFocusAfterResolving = (openFlags: readonly Flag[], onGone: () => void) => {
+  const [resolved, setResolved] = useState<string | null>(null);
+  const gone = resolved !== null && openFlags.every((flag) => flag.id !== resolved);
+  useEffect(() => {
+    if (!gone) return undefined;
+    const timer = window.setTimeout(() => {
+      setResolved(null);
+      if (document.activeElement === document.body) onGone();
+    });
+    return () => window.clearTimeout(timer);
+  }, [gone, onGone]);
+  return setResolved;
+};
+
 const shownAtMost = 3;
 
 /** Open flags, safety first; more than three become "2 more". */
-export const FlagChips = ({ patient }: FlagChipsProps) => {
+export const FlagChips = ({ patient, onGone }: FlagChipsProps) => {
+  const onResolved = useFocusAfterResolving(patient.openFlags, onGone);
   const flags = [...patient.openFlags].sort(
     (a, b) => Number(b.severity === 'safety') - Number(a.severity === 'safety'),
   );
@@ -73,12 +95,12 @@ export const FlagChips = ({ patient }: FlagChipsProps) => {
     <ul aria-label="Open flags" className="flex flex-wrap gap-x-2 gap-y-1">
       {shown.map((flag) => (
         <li key={flag.id}>
-          <FlagChip words={flag.label} flags={[flag]} patient={patient} />
+          <FlagChip words={flag.label} flags={[flag]} patient={patient} onResolved={onResolved} />
         </li>
       ))}
       {rest.length > 0 && (
         <li>
-          <FlagChip words={`${rest.length} more`} flags={rest} patient={patient} />
+          <FlagChip words={`${rest.length} more`} flags={rest} patient={patient} onResolved={onResolved} />
         </li>
       )}
     </ul>

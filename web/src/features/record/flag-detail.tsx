@@ -25,7 +25,8 @@ export const FlagDetail = ({ flag, patientId, canResolve, onResolved }: FlagDeta
   const save = (): void => {
     setMissing(note.trim() === '');
     if (note.trim() === '') return;
-    resolve.mutate({ version: flag.version, note: note.trim() }, { onSuccess: onResolved });
+    // The renewed record may take this card away before the answer is here, so its caller waits for the answer itself.
+    resolve.mutateAsync({ version: flag.version, note: note.trim() }).then(onResolved, () => undefined);
   };
   return (
     <section aria-label={flag.label}>

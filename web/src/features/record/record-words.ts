@@ -11,12 +11,16 @@ export const enrollmentStatusLabels: Record<Enrollment['status'], string> = {
   withdrawn: 'Withdrawn',
 };
 
+/** Where Details offers to enroll. */
+export const enrollHash = '#enroll';
+
 /** The course in the standing header: "Since Sep 14, 24 sessions". */
-export const courseWords = (enrollment: Enrollment | null): string => {
+export const courseWords = (enrollment: Enrollment | null, today: string): string => {
   if (!enrollment) return 'Not enrolled';
   const sessions = `${enrollment.plannedSessions} sessions`;
   const start = formatDayMonth(enrollment.startOn);
-  if (enrollment.status === 'planned') return `Starts ${start}, ${sessions}`;
+  if (enrollment.status === 'planned')
+    return `${enrollment.startOn < today ? 'Planned,' : 'Starts'} ${start}, ${sessions}`;
   if (enrollment.status === 'active') return `Since ${start}, ${sessions}`;
   if (enrollment.status === 'paused') return `Paused, since ${start}`;
   const end = enrollment.endedOn ? ` ${formatDate(enrollment.endedOn)}` : '';
