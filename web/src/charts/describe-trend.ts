@@ -1,7 +1,7 @@
 import type { TrendPoint, TrendSeries } from '@slighthill/shared/contracts/trend';
 import { getMeasure, isMeasureId } from '@slighthill/shared/measures';
 import { formatDate } from '../lib/clinic-time';
-import { formatInView, formatResult } from './format-measure';
+import { formatInView, formatResult, unitInName } from './format-measure';
 import { pointInView, type TrendView } from './trend-view';
 import { changeWords, verdictWords } from './verdict-words';
 
@@ -9,7 +9,7 @@ const viewWords: Record<TrendView, string> = { 'percent-predicted': ', percent p
 
 export const measureTitle = (series: TrendSeries, view: TrendView): string => {
   const measure = isMeasureId(series.measure) ? getMeasure(series.measure) : null;
-  if (view !== 'value' || series.unit === '' || measure === null)
+  if (view !== 'value' || series.unit === '' || measure === null || unitInName(series.measure, series.unit))
     return `${measure?.label ?? series.measure}${viewWords[view]}`;
   const units: Record<string, string> = { L: 'liters', m: 'meters', '%': 'percent', s: 'seconds' };
   return `${measure.label}, ${units[series.unit] ?? series.unit}`;

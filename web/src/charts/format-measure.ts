@@ -13,9 +13,13 @@ const withUnit = (text: string, unit: string): string => {
   return unit === '%' ? `${text}%` : `${text} ${unit}`;
 };
 
+/** A unit that the measure's name already says: "mMRC breathlessness grade". */
+export const unitInName = (measure: string, unit: string): boolean =>
+  unit.length > 2 && isMeasureId(measure) && getMeasure(measure).label.toLowerCase().split(' ').includes(unit);
+
 /** "1.32 L", "352 m", "91%", "17". */
 export const formatResult = (measure: string, value: number, unit: string): string =>
-  withUnit(formatValue(measure, value), unit);
+  withUnit(formatValue(measure, value), unitInName(measure, unit) ? '' : unit);
 
 /** A change of this size in words; one grade is not "1 grades". */
 export const formatAmount = (measure: string, amount: number, unit: string): string => {

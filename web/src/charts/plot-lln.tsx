@@ -1,32 +1,31 @@
 import { LinePath } from '@visx/shape';
+import type { LabelPlace } from './label-room';
 import type { LlnLine } from './lln-line';
+import { llnPath } from './plot-labels';
 import type { TrendLayout } from './trend-layout';
 
 interface PlotLlnProps {
   layout: TrendLayout;
   line: LlnLine;
+  label: LabelPlace | null;
 }
 
 /** The lower limit of normal on each day, carried flat to both edges and labeled with its latest value. */
-export const PlotLln = ({ layout: { frame, x, y }, line }: PlotLlnProps) => {
-  const at = line.points.map(({ day, value }) => ({ x: x(day), y: y(value) }));
-  const [first, last] = [at[0], at.at(-1)];
-  if (!first || !last) return null;
-  const path = [{ x: frame.left, y: first.y }, ...at, { x: frame.right, y: last.y }];
-  return (
-    <g>
-      <LinePath
-        data={path}
-        x={(point) => point.x}
-        y={(point) => point.y}
-        stroke="var(--heather)"
-        strokeWidth={1.6}
-        strokeDasharray="6 5"
-      />
+export const PlotLln = ({ layout, line, label }: PlotLlnProps) => (
+  <g>
+    <LinePath
+      data={llnPath(layout, line)}
+      x={(point) => point.x}
+      y={(point) => point.y}
+      stroke="var(--heather)"
+      strokeWidth={1.6}
+      strokeDasharray="6 5"
+    />
+    {label && (
       <text
-        x={line.steady ? frame.left + 8 : frame.right - 8}
-        y={(line.steady ? first : last).y - 6}
-        textAnchor={line.steady ? 'start' : 'end'}
+        x={label.x}
+        y={label.y}
+        textAnchor={label.anchor}
         fontSize={13}
         fill="var(--heather)"
         stroke="var(--paper)"
@@ -36,6 +35,6 @@ export const PlotLln = ({ layout: { frame, x, y }, line }: PlotLlnProps) => {
       >
         {line.label}
       </text>
-    </g>
-  );
-};
+    )}
+  </g>
+);

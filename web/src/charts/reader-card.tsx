@@ -25,7 +25,7 @@ export const ReaderCard = ({ description: { date, role, figures, details } }: Re
 
 /** About how high the card will be: it is placed before it is drawn. */
 export const cardHeightPx = ({ details, figures }: PointDescription): number => {
-  const lines = Math.ceil(details.length / 36);
+  const lines = Math.ceil(details.length / 38);
   const labelLines = figures.some(({ label }) => label.length > 12) ? 2 : 1;
   return 72 + labelLines * 18 + (lines === 0 ? 0 : 13 + lines * 18);
 };

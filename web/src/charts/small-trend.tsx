@@ -39,7 +39,7 @@ export const SmallTrend = ({ series, onChoose }: SmallTrendProps) => {
     <button
       type="button"
       onClick={onChoose}
-      className="-m-2 block max-w-68 rounded-control p-2 text-left transition-colors duration-120 hover:bg-mist"
+      className="-m-2 block max-w-68 rounded-control p-2 text-left transition-shadow duration-120 hover:ring-1 hover:ring-edge"
     >
       <span className="block">
         <span className="text-body font-bold">{name}</span>{' '}

@@ -4,9 +4,10 @@ import { cx } from '../ui/cx';
 import { describePoint } from './describe-point';
 import { describeTrend } from './describe-trend';
 import { differenceBracket } from './important-difference';
+import { llnLine } from './lln-line';
 import { placeCard } from './place-card';
 import { differenceWordsAt } from './plot-difference';
-import { latestLabel, markBoxes } from './plot-latest';
+import { markBoxes, plotLabels } from './plot-labels';
 import { cardHeightPx, ReaderCard } from './reader-card';
 import type { Course } from './time-axis';
 import { trendLayout } from './trend-layout';
@@ -35,7 +36,8 @@ export const TrendChart = ({ series, view, patternAbnormal, course, onOpenPoint 
   const layout = trendLayout({ series, view, bands, course, width });
   const { frame, marks, narrow } = layout;
   const { read, announces, handlers } = useReader(marks, onOpenPoint);
-  const label = latestLabel(series, view, bands, layout);
+  const lln = llnLine(series, view);
+  const labels = plotLabels({ series, view, bands, layout, course, lln });
   const baseline = marks.find((mark) => mark.point.role === 'baseline');
   const bracket = differenceBracket(series, view);
   const inLegend = baseline && bracket && differenceWordsAt(layout, baseline, bracket, course) === 'legend';
@@ -51,7 +53,10 @@ export const TrendChart = ({ series, view, patternAbnormal, course, onOpenPoint 
             width: frame.right - frame.left,
             height: frame.height - frame.top,
           },
-          keepClear: [...markBoxes(marks), ...(label ? [label.box] : [])],
+          keepClear: [
+            ...markBoxes(marks),
+            ...[labels.latest, labels.lln].flatMap((label) => (label ? [label.box] : [])),
+          ],
         })
       : null;
   const count = marks.length === 1 ? '1 point' : `${marks.length} points`;
@@ -67,7 +72,7 @@ export const TrendChart = ({ series, view, patternAbnormal, course, onOpenPoint 
         {...handlers}
         className={cx('relative rounded-cell', read && 'cursor-pointer')}
       >
-        <TrendPlot {...{ series, view, course, layout, label, read }} />
+        <TrendPlot {...{ series, view, course, layout, lln, labels, read }} />
         {described && place && (
           <div data-print="hide" className="pointer-events-none absolute w-68" style={place}>
             <ReaderCard description={described} />

@@ -70,7 +70,8 @@ const frameOf = (width: number, hasBands: boolean): Frame & { narrow: boolean } 
     height,
     left: axisPx.left,
     top: axisPx.top,
-    right: width - gutter,
+    // A page laid out for paper may measure almost nothing.
+    right: Math.max(axisPx.left, width - gutter),
     bottom: height - axisPx.bottom,
     narrow,
   };

@@ -2,12 +2,13 @@ import { Line, LinePath } from '@visx/shape';
 import type { TrendSeries } from '@slighthill/shared/contracts/trend';
 import { ChartMark } from './chart-mark';
 import { differenceBracket } from './important-difference';
-import { llnLine } from './lln-line';
+import type { LlnLine } from './lln-line';
 import { PlotAxes } from './plot-axes';
 import { PlotBands } from './plot-bands';
 import { PlotCourse } from './plot-course';
 import { PlotDifference } from './plot-difference';
-import { PlotLatest, type LatestLabel } from './plot-latest';
+import type { PlotLabels } from './plot-labels';
+import { PlotLatest } from './plot-latest';
 import { PlotLln } from './plot-lln';
 import type { Course } from './time-axis';
 import type { DrawnMark, TrendLayout } from './trend-layout';
@@ -18,7 +19,8 @@ interface TrendPlotProps {
   view: TrendView;
   course: Course | null;
   layout: TrendLayout;
-  label: LatestLabel | null;
+  lln: LlnLine | null;
+  labels: PlotLabels;
   read: DrawnMark | null;
 }
 
@@ -28,9 +30,8 @@ const DateStem = ({ mark: { x, y, dateX, r } }: { mark: DrawnMark }) =>
     <path d={`M${x} ${y}L${dateX} ${y + r + 5}`} stroke="var(--ink)" strokeWidth={1} fill="none" />
   );
 
-export const TrendPlot = ({ series, view, course, layout, label, read }: TrendPlotProps) => {
+export const TrendPlot = ({ series, view, course, layout, lln, labels, read }: TrendPlotProps) => {
   const { frame, marks, line, stems } = layout;
-  const lln = llnLine(series, view);
   const bracket = differenceBracket(series, view);
   const baseline = marks.find((mark) => mark.point.role === 'baseline');
   return (
@@ -42,7 +43,7 @@ export const TrendPlot = ({ series, view, course, layout, label, read }: TrendPl
     >
       <PlotBands layout={layout} measure={series.measure} />
       <PlotAxes layout={layout} />
-      {lln && <PlotLln layout={layout} line={lln} />}
+      {lln && <PlotLln layout={layout} line={lln} label={labels.lln} />}
       {course && <PlotCourse layout={layout} course={course} />}
       {bracket && baseline && <PlotDifference layout={layout} baseline={baseline} bracket={bracket} course={course} />}
       {stems.map((stem) => (
@@ -66,7 +67,7 @@ export const TrendPlot = ({ series, view, course, layout, label, read }: TrendPl
         </g>
       ))}
       {read && <circle cx={read.x} cy={read.y} r={9.5} fill="none" stroke="var(--tarn)" strokeWidth={2} />}
-      {label && <PlotLatest label={label} />}
+      {labels.latest && <PlotLatest label={labels.latest} />}
     </svg>
   );
 };

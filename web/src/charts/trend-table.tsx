@@ -5,7 +5,7 @@ import { formatDate } from '../lib/clinic-time';
 import { Icon } from '../ui/icon';
 import { Cell, HeaderCell, Row, Table, TableBody, TableHead } from '../ui/table';
 import { describeTrend } from './describe-trend';
-import { formatInView, formatResult, formatValue } from './format-measure';
+import { formatInView, formatResult } from './format-measure';
 import { capitalize, stateWords } from './rule-words';
 import { availableViews, type TrendView } from './trend-view';
 
@@ -85,7 +85,7 @@ export const TrendTable = ({ series, view, hrefOf }: TrendTableProps) => {
               )}
               {(has.percent || has.z) && (
                 <Cell label="LLN" numeric>
-                  {point.lln === null ? dash : formatValue(measure, point.lln)}
+                  {point.lln === null ? dash : formatResult(measure, point.lln, unit)}
                 </Cell>
               )}
               {graded && <Cell label="Band">{point.graded && point.bandLabel ? point.bandLabel : dash}</Cell>}

@@ -27,7 +27,7 @@ export const Segmented = <Value extends string>({
         <label
           key={choice.value}
           className={cx(
-            'relative flex min-h-9 cursor-pointer items-center border-l border-rim px-4 text-body font-semibold transition-colors duration-120 first:rounded-l-control first:border-l-0 last:rounded-r-control',
+            'relative flex min-h-9 cursor-pointer items-center border-l border-rim px-4 text-body font-semibold transition-colors duration-120 first-of-type:rounded-l-control first-of-type:border-l-0 last-of-type:rounded-r-control',
             'has-focus-visible:z-1 has-focus-visible:outline-3 has-focus-visible:outline-offset-2 has-focus-visible:outline-tarn',
             value === choice.value ? 'bg-tarn-wash text-tarn-deep' : 'text-ink hover:bg-mist',
           )}
