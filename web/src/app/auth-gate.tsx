@@ -9,6 +9,7 @@ import { currentArea } from './areas';
 import { LoadingPage } from './loading-page';
 import { NotFoundPage } from './not-found-page';
 import { SessionGuard } from './session-guard';
+import { useHeadingFocus } from './use-heading-focus';
 
 const StaffLayout = lazy(() => import('./staff-layout').then((module) => ({ default: module.StaffLayout })));
 const PatientLayout = lazy(() => import('./patient-layout').then((module) => ({ default: module.PatientLayout })));
@@ -17,6 +18,7 @@ const PatientLayout = lazy(() => import('./patient-layout').then((module) => ({ 
 export const Component = () => {
   const location = useLocation();
   const me = useQuery(meQuery);
+  useHeadingFocus();
 
   if (me.data) {
     const Layout = me.data.patientId === null ? StaffLayout : PatientLayout;

@@ -2,6 +2,7 @@ import { Navigate, type RouteObject } from 'react-router-dom';
 import { ErrorPage } from './error-page';
 import { LoadingPage } from './loading-page';
 import { NotFoundPage } from './not-found-page';
+import { overPage } from './use-heading-focus';
 
 const clinicSections: RouteObject[] = [
   { index: true, element: <Navigate to="users" replace /> },
@@ -25,7 +26,7 @@ const signedInRoutes: RouteObject[] = [
   {
     path: 'patients',
     lazy: () => import('../features/patients/patients-page'),
-    children: [{ path: 'new', lazy: () => import('../features/patients/new-patient-drawer') }],
+    children: [{ path: 'new', handle: overPage, lazy: () => import('../features/patients/new-patient-drawer') }],
   },
   { path: 'patients/:patientId', lazy: () => import('./record-route'), children: recordSections },
   { path: 'clinic', lazy: () => import('../features/clinic/clinic-page'), children: clinicSections },

@@ -12,6 +12,8 @@ import { TextInput } from '../ui/text-input';
 interface SessionCoverProps {
   user: CurrentUser;
   onWelcomeBack: (user: CurrentUser) => void;
+  /** The cover is gone and the page can be reached again. */
+  onLifted: () => void;
 }
 
 const explain = (error: unknown): string => {
@@ -22,7 +24,7 @@ const explain = (error: unknown): string => {
 };
 
 /** Opaque, over everything: asks the same person's password. Nothing else of the page is left to read. */
-export const SessionCover = ({ user, onWelcomeBack }: SessionCoverProps) => {
+export const SessionCover = ({ user, onWelcomeBack, onLifted }: SessionCoverProps) => {
   const password = useRef<HTMLInputElement>(null);
   const [saving, setSaving] = useState(false);
   const [error, setError] = useState<string>();
@@ -57,6 +59,10 @@ export const SessionCover = ({ user, onWelcomeBack }: SessionCoverProps) => {
           onOpenAutoFocus={(event) => {
             event.preventDefault();
             password.current?.focus();
+          }}
+          onCloseAutoFocus={(event) => {
+            event.preventDefault();
+            onLifted();
           }}
           data-session-cover
           className="fixed inset-0 z-100 flex flex-col items-center overflow-y-auto bg-paper px-5 pt-[14vh] pb-10 outline-none"

@@ -64,6 +64,7 @@ describe('idle cover', () => {
     await waitFor(() => expect(screen.queryByText('Continue with your password')).not.toBeInTheDocument());
     expect(seen[0]?.body).toEqual({ email: 'mira@clinic.test', password: 'long enough words' });
     expect(screen.getByRole('textbox', { name: 'Given name' })).toHaveValue('Ruth');
+    await waitFor(() => expect(screen.getByRole('textbox', { name: 'Given name' })).toHaveFocus());
     expect(document.title).toBe('New patient · Slighthill');
   });
 

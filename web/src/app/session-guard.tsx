@@ -1,6 +1,6 @@
 import { useQueryClient } from '@tanstack/react-query';
 import type { CurrentUser } from '@slighthill/shared/contracts/auth';
-import { useEffect, useState, type ReactNode } from 'react';
+import { useEffect, useRef, useState, type ReactNode } from 'react';
 import { setCoverTitle } from '../lib/page-title';
 import { meQuery } from '../lib/session';
 import { onSessionNews } from '../lib/session-channel';
@@ -37,6 +37,7 @@ export const SessionGuard = ({ user, children }: SessionGuardProps) => {
   const { state, secondsLeft, resume } = useIdleSession(user.idleSeconds);
   const [overlayRoot, setOverlayRoot] = useState<HTMLElement | null>(null);
   const covered = state === 'expired';
+  const lastFocused = useRef<HTMLElement | null>(null);
   useOtherTabs(user.id);
 
   useEffect(() => {
@@ -57,12 +58,17 @@ export const SessionGuard = ({ user, children }: SessionGuardProps) => {
         aria-hidden={covered || undefined}
         data-covered={covered || undefined}
         className={covered ? 'invisible' : ''}
+        onFocus={({ target }) => {
+          lastFocused.current = target;
+        }}
       >
         {children}
         <div ref={setOverlayRoot} />
       </div>
       {state === 'warning' && <IdleWarning secondsLeft={secondsLeft} onStay={resume} />}
-      {covered && <SessionCover user={user} onWelcomeBack={welcomeBack} />}
+      {covered && (
+        <SessionCover user={user} onWelcomeBack={welcomeBack} onLifted={() => lastFocused.current?.focus()} />
+      )}
     </OverlayRootContext>
   );
 };

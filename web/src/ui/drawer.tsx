@@ -1,5 +1,5 @@
 import { Dialog as Primitive } from 'radix-ui';
-import type { ReactNode } from 'react';
+import { useRef, useState, type ReactNode } from 'react';
 import { IconButton } from './icon-button';
 import { Key } from './key';
 import { useOverlayRoot } from './overlay-root';
@@ -18,12 +18,18 @@ interface DrawerProps {
   children: ReactNode;
 }
 
+const field = 'input:not([type="hidden"], :disabled), select:not(:disabled), textarea:not(:disabled)';
+
 /**
  * 792 from the right, under the top bar, with the list behind it dimmed and readable; the whole page below 1100.
- * Rendered while it is open: mount it to open it. It traps focus and gives it back.
+ * Rendered while it is open: mount it to open it. It traps focus, starts at the first
+ * field and gives the focus back.
  */
 export const Drawer = ({ title, subtitle, onClose, work, foot, children }: DrawerProps) => {
   const container = useOverlayRoot();
+  const body = useRef<HTMLDivElement>(null);
+  // Taken before a field of the form takes the focus, so that closing gives it back to what opened the drawer.
+  const [opener] = useState(() => (document.activeElement instanceof HTMLElement ? document.activeElement : null));
   const close = (): void => {
     if (work) work.requestLeave(onClose);
     else onClose();
@@ -35,6 +41,18 @@ export const Drawer = ({ title, subtitle, onClose, work, foot, children }: Drawe
           <Primitive.Overlay className="fixed inset-0 top-(--top-bar-height) z-40 bg-ink/4.5" data-print="hide" />
           <Primitive.Content
             aria-describedby={undefined}
+            onOpenAutoFocus={(event) => {
+              const place = body.current;
+              const first = place?.querySelector<HTMLElement>(field);
+              if (!place || !first) return;
+              event.preventDefault();
+              if (!place.contains(document.activeElement)) first.focus();
+            }}
+            onCloseAutoFocus={(event) => {
+              if (!opener?.isConnected || opener === document.body) return;
+              event.preventDefault();
+              opener.focus();
+            }}
             onInteractOutside={(event) => {
               if (event.target instanceof Element && event.target.closest('[data-session-notice]'))
                 event.preventDefault();
@@ -53,7 +71,9 @@ export const Drawer = ({ title, subtitle, onClose, work, foot, children }: Drawe
                 <IconButton icon="close" label="Close" onClick={close} />
               </div>
             </header>
-            <div className="min-h-0 flex-1 overflow-y-auto px-5 py-5 row:px-8">{children}</div>
+            <div ref={body} className="min-h-0 flex-1 overflow-y-auto px-5 py-5 row:px-8">
+              {children}
+            </div>
             {foot && (
               <footer className="flex flex-wrap items-center justify-end gap-3 border-t border-line px-5 py-4 row:px-8">
                 {foot}

@@ -45,7 +45,7 @@ export const Component = () => {
               </h3>
               <ul>
                 {items.map((entry) => (
-                  <FileRow key={entry.id} patient={patient} entry={entry} />
+                  <FileRow key={entry.id} patient={patient} entry={entry} onStale={() => void query.refetch()} />
                 ))}
               </ul>
             </section>

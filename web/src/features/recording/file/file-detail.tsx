@@ -13,7 +13,6 @@ import { VoidDialog } from '../history/void-dialog';
 import { VoidedNotice } from '../history/voided-notice';
 import { fileEntryQuery } from '../queries';
 import { fileFacts } from './file-facts';
-import { ReleaseDialog } from './release-dialog';
 
 const FileAmendDrawer = lazy(() => import('./file-amend-drawer').then((m) => ({ default: m.FileAmendDrawer })));
 
@@ -25,7 +24,7 @@ interface FileDetailProps {
 export const FileDetail = ({ patient, entryId }: FileDetailProps) => {
   const timeZone = useClinicZone();
   const query = useQuery(fileEntryQuery(patient.id, entryId));
-  const [open, setOpen] = useState<'amend' | 'void' | 'release' | null>(null);
+  const [open, setOpen] = useState<'amend' | 'void' | null>(null);
   const close = (): void => setOpen(null);
   if (query.isPending) return <SkeletonRows label="Loading the history" rows={2} bars={[30, 40]} />;
   if (!query.data)
@@ -46,13 +45,8 @@ export const FileDetail = ({ patient, entryId }: FileDetailProps) => {
         factsOf={(content) => fileFacts(content, timeZone)}
         now={fileFacts(entry, timeZone)}
       />
-      {abilities.length > 0 && (
+      {abilities.some((ability) => ability !== 'release') && (
         <div className="flex flex-wrap gap-2">
-          {abilities.includes('release') && (
-            <Button kind="main" size="row" onClick={() => setOpen('release')}>
-              Release the hold
-            </Button>
-          )}
           {abilities.includes('amend') && (
             <Button size="row" icon="pen" onClick={() => setOpen('amend')}>
               Amend
@@ -80,7 +74,6 @@ export const FileDetail = ({ patient, entryId }: FileDetailProps) => {
           onStale={() => void query.refetch()}
         />
       )}
-      {open === 'release' && <ReleaseDialog entry={entry} onClose={close} onStale={() => void query.refetch()} />}
     </div>
   );
 };

@@ -1,16 +1,19 @@
 import type { FileEntry } from '@slighthill/shared/contracts/file-entry';
 import type { Patient } from '@slighthill/shared/contracts/patient';
-import { useId, useState } from 'react';
+import { useId, useRef, useState } from 'react';
 import { formatDate, formatInstant } from '../../../lib/clinic-time';
 import { useClinicZone } from '../../../lib/session';
 import { Badge } from '../../../ui/badge';
 import { Button } from '../../../ui/button';
 import { FileDetail } from './file-detail';
 import { fileEntryWords } from './file-words';
+import { ReleaseDialog } from './release-dialog';
 
 interface FileRowProps {
   patient: Patient;
   entry: FileEntry;
+  /** Someone changed the entry since the list was got. */
+  onStale: () => void;
 }
 
 const HoldState = ({ entry }: { entry: FileEntry }) => {
@@ -30,9 +33,15 @@ const HoldState = ({ entry }: { entry: FileEntry }) => {
 };
 
 /** One entry in a line; its history and what may be done with it open below. */
-export const FileRow = ({ patient, entry }: FileRowProps) => {
+export const FileRow = ({ patient, entry, onStale }: FileRowProps) => {
   const id = useId();
   const [open, setOpen] = useState(false);
+  const [releasing, setReleasing] = useState(false);
+  const history = useRef<HTMLButtonElement>(null);
+  const onHold = entry.kind === 'safety-hold' && !entry.released && !entry.voided;
+  const mayRelease = patient.abilities.includes('release-hold') && onHold;
+  // The button that opened the dialog is gone with the hold: the focus stays on the row, on what it still offers.
+  const focusRow = (): void => void window.setTimeout(() => history.current?.focus());
   const words = fileEntryWords(entry);
   return (
     <li className="border-b border-row py-2.5 first:border-t first:border-t-rule">
@@ -46,7 +55,13 @@ export const FileRow = ({ patient, entry }: FileRowProps) => {
           {entry.note && <span className="basis-full text-note text-ink-soft">{entry.note}</span>}
         </span>
         <span className="text-note text-ink-soft">{entry.recordedBy.displayName}</span>
+        {mayRelease && (
+          <Button size="row" aria-label={`Release ${words}`} onClick={() => setReleasing(true)}>
+            Release
+          </Button>
+        )}
         <Button
+          ref={history}
           kind="quiet"
           size="row"
           aria-expanded={open}
@@ -60,6 +75,17 @@ export const FileRow = ({ patient, entry }: FileRowProps) => {
       <div id={id} hidden={!open}>
         {open && <FileDetail patient={patient} entryId={entry.id} />}
       </div>
+      {releasing && (
+        <ReleaseDialog
+          entry={entry}
+          onClose={() => setReleasing(false)}
+          onReleased={() => {
+            setReleasing(false);
+            focusRow();
+          }}
+          onStale={onStale}
+        />
+      )}
     </li>
   );
 };

@@ -79,15 +79,22 @@ describe('the File section', () => {
 
   it('groups entries, holds first, and releases one with a reason', async () => {
     const hold = entryOf({});
-    plan('GET /api/patients/:id', { patient: ruth });
-    plan('GET /api/patients/:id/file-entries', {
-      items: [
-        entryOf({ id: idOf(402), kind: 'smoking', details: { status: 'never', packYears: null, quitOn: null } }),
-        hold,
-      ],
-      nextCursor: null,
+    const smoking = entryOf({
+      id: idOf(402),
+      kind: 'smoking',
+      details: { status: 'never', packYears: null, quitOn: null },
     });
-    plan('GET /api/file-entries/:id', { entry: hold, history: [], abilities: ['release', 'void'] });
+    const released = {
+      at: '2026-10-14T16:26:00Z',
+      by: { id: idOf(2), displayName: 'Dr. Lund' },
+      reason: 'Rate 92 today',
+    };
+    plan('GET /api/patients/:id', { patient: { ...ruth, abilities: ['release-hold'] } });
+    plan(
+      'GET /api/patients/:id/file-entries',
+      { items: [smoking, hold], nextCursor: null },
+      { items: [smoking, entryOf({ released })], nextCursor: null },
+    );
     const sent = plan('POST /api/file-entries/:id/release', { entry: hold });
     const { user } = renderRecord(<FilePage />, '/patients/:patientId/file', `/patients/${ruth.id}/file`);
     await screen.findByRole('heading', { name: 'Safety hold' });
@@ -96,8 +103,7 @@ describe('the File section', () => {
       'Smoking',
     ]);
     expect(screen.getByText('On hold')).toBeVisible();
-    await user.click(screen.getByRole('button', { name: 'History of Resting heart rate over 120 per minute' }));
-    await user.click(await screen.findByRole('button', { name: 'Release the hold' }));
+    await user.click(screen.getByRole('button', { name: 'Release Resting heart rate over 120 per minute' }));
     const dialog = screen.getByRole('dialog', { name: 'Release this hold?' });
     await user.click(within(dialog).getByRole('button', { name: 'Release it' }));
     expect(await within(dialog).findByText('The reason is missing')).toBeVisible();
@@ -105,5 +111,16 @@ describe('the File section', () => {
     await user.click(within(dialog).getByRole('button', { name: 'Release it' }));
     await waitFor(() => expect(sent).toHaveLength(1));
     expect(sent[0]?.body).toEqual({ version: 1, reason: 'Rate 92 today' });
+    expect(await screen.findByText(/^Released .* by Dr\. Lund: Rate 92 today$/)).toBeVisible();
+    expect(screen.queryByRole('button', { name: /^Release / })).not.toBeInTheDocument();
+    await waitFor(() => expect(screen.getByRole('button', { name: /^History of Resting heart rate/ })).toHaveFocus());
+  });
+
+  it('offers no release to others', async () => {
+    plan('GET /api/patients/:id', { patient: ruth });
+    plan('GET /api/patients/:id/file-entries', { items: [entryOf({})], nextCursor: null });
+    renderRecord(<FilePage />, '/patients/:patientId/file', `/patients/${ruth.id}/file`);
+    expect(await screen.findByText('On hold')).toBeVisible();
+    expect(screen.queryByRole('button', { name: /^Release/ })).not.toBeInTheDocument();
   });
 });

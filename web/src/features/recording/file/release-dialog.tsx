@@ -13,6 +13,7 @@ import { fileEntryWords } from './file-words';
 interface ReleaseDialogProps {
   entry: FileEntry;
   onClose: () => void;
+  onReleased: () => void;
   onStale: () => void;
 }
 
@@ -25,7 +26,7 @@ const resolver = resolverFor<{ reason: string }>(({ reason }) =>
 );
 
 /** A hold is released by a pulmonologist with a reason; both stay readable. */
-export const ReleaseDialog = ({ entry, onClose, onStale }: ReleaseDialogProps) => {
+export const ReleaseDialog = ({ entry, onClose, onReleased, onStale }: ReleaseDialogProps) => {
   const [problem, setProblem] = useState<string | null>(null);
   const { register, handleSubmit, formState } = useForm({ defaultValues: { reason: '' }, resolver });
   const save = useSaveAboutPatient<unknown>(entry.patientId);
@@ -34,7 +35,7 @@ export const ReleaseDialog = ({ entry, onClose, onStale }: ReleaseDialogProps) =
     save.mutate(
       { path: `/api/file-entries/${entry.id}/release`, body: { version: entry.version, reason: reason.trim() } },
       {
-        onSuccess: onClose,
+        onSuccess: onReleased,
         onError: (error) => {
           if (isStale(error)) onStale();
           setProblem(
