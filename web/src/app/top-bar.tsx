@@ -64,7 +64,7 @@ const useStaffRidge = ({ narrow }: RidgedProps) => {
 };
 
 const Brand = () => (
-  <Link to="/" className="flex items-center gap-3 rounded-control margin:w-38">
+  <Link to="/" className="flex min-h-9 items-center gap-3 rounded-control margin:w-38">
     <Mark width={34} />
     <span className="text-chart">Slighthill</span>
   </Link>

@@ -21,7 +21,7 @@ export const PatientRow = ({ patient }: PatientRowProps) => {
         <Link
           to={`/patients/${patient.id}`}
           data-row-link
-          className="rounded-tag font-semibold text-tarn after:absolute after:inset-0 hover:text-tarn-deep"
+          className="-my-1.25 inline-flex min-h-8 items-center rounded-tag font-semibold text-tarn after:absolute after:inset-0 hover:text-tarn-deep"
         >
           {patient.familyName}, {patient.givenName}
         </Link>

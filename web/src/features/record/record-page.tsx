@@ -5,6 +5,7 @@ import type { Patient } from '@slighthill/shared/contracts/patient';
 import { ApiProblem, describeProblem } from '../../lib/api-problem';
 import { usePageTitle } from '../../lib/page-title';
 import { ButtonLink } from '../../ui/button';
+import { EmptyState } from '../../ui/empty-state';
 import { ErrorNotice } from '../../ui/error-notice';
 import { MarginNav } from '../../ui/margin-nav';
 import { MarginSection } from '../../ui/margin-section';
@@ -47,10 +48,9 @@ const UnreadableRecord = ({ error, onRetry, retrying }: UnreadableProps) => {
     <div className="page-frame py-10">
       <h1 className="text-title">{absent ? 'There is no such record' : 'This record could not be loaded'}</h1>
       {absent ? (
-        <div className="mt-4 flex flex-col items-start gap-4">
-          <p>Your clinic has no patient at this address.</p>
-          <ButtonLink to="/patients">Go to Patients</ButtonLink>
-        </div>
+        <EmptyState action={<ButtonLink to="/patients">Go to Patients</ButtonLink>}>
+          Your clinic has no patient at this address.
+        </EmptyState>
       ) : (
         <ErrorNotice className="mt-6 max-w-160" onRetry={onRetry} retrying={retrying}>
           {describeProblem(error)}

@@ -31,8 +31,8 @@ export const Component = () => {
 
   return (
     <>
-      <p className="mb-2">
-        <Link to={`/patients/${patientId}/tests`} className="link">
+      <p className="mb-1">
+        <Link to={`/patients/${patientId}/tests`} className="link inline-flex min-h-8 items-center">
           All tests
         </Link>
       </p>

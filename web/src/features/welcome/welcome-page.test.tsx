@@ -47,6 +47,7 @@ describe('welcome page', () => {
     answer('POST /api/auth/invitation/look-up', problem('not-found', 'This link is not known.'));
     renderApp('/welcome#used', null);
     expect(await screen.findByText(/This link has been used or is too old/)).toBeVisible();
+    expect(screen.getByRole('heading', { level: 1, name: 'This link cannot be used' })).toBeVisible();
     expect(screen.queryByLabelText('New password')).not.toBeInTheDocument();
   });
 });

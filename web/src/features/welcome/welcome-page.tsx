@@ -16,7 +16,8 @@ interface ClosedLinkProps {
 
 const ClosedLink = ({ children }: ClosedLinkProps) => (
   <>
-    <p>{children}</p>
+    <h1 className="text-p-title">{translate('welcome.closed')}</h1>
+    <p className="mt-2">{children}</p>
     <ButtonLink to="/sign-in" size="patient" className="mt-6">
       {translate('welcome.to-sign-in')}
     </ButtonLink>

@@ -3,6 +3,7 @@ import { useEffect, useId, useMemo, useRef, useState, type KeyboardEvent, type R
 import { cx } from '../../../ui/cx';
 import { TextInput } from '../../../ui/text-input';
 import { enterableMeasures } from './result-form';
+import { unitBeside } from './unit-beside';
 
 interface MeasurePickerProps {
   value: string;
@@ -138,7 +139,7 @@ export const MeasurePicker = ({ value, onChoose, ref }: MeasurePickerProps) => {
                 )}
               >
                 <span>{measure.label}</span>
-                <span className="text-note text-ink-soft">{measure.unit.symbol}</span>
+                <span className="text-note text-ink-soft">{measure.unit.symbol && unitBeside(measure)}</span>
               </div>
             ))}
           </div>

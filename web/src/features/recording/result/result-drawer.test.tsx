@@ -13,6 +13,7 @@ import { emptyResultForm, enterableMeasures, usualConditions, type ResultForm } 
 import { resultQuestions } from './result-questions';
 import { checkResult } from './result-request';
 import { isFlagged } from './safety-item-field';
+import { unitBeside } from './unit-beside';
 
 const open = async () => {
   planQuietRecord();
@@ -98,6 +99,8 @@ describe('the fields of a result', () => {
     renderRecord(<OneMeasure measure={measure.id} />);
     if (measure.gradeDescriptions) expect(screen.getAllByRole('radio')).toHaveLength(measure.gradeDescriptions.length);
     else expect(screen.getByRole('textbox', { name: measure.label })).toBeVisible();
+    const highest = measure.unit.ucum === '{score}' && !measure.gradeDescriptions && measure.absolute?.max;
+    expect(screen.queryAllByText(`of ${highest}`)).toHaveLength(highest === false ? 0 : 1);
     for (const { label, type } of Object.values(measure.conditions)) {
       const role = { number: 'textbox', choice: 'combobox', boolean: 'group' }[type];
       expect(screen.getByRole(role, { name: label })).toBeVisible();
@@ -106,6 +109,14 @@ describe('the fields of a result', () => {
     expect(screen.queryAllByRole('group', { name: measure.safetyItem?.label ?? 'none' })).toHaveLength(
       measure.safetyItem ? 1 : 0,
     );
+  });
+});
+
+describe('what stands beside a result', () => {
+  it('is the highest score, the unit, or nothing where the name says it', () => {
+    expect(unitBeside(getMeasure('phq9'))).toBe('of 27');
+    expect(unitBeside(getMeasure('sixMinuteWalkDistance'))).toBe('m');
+    expect(unitBeside(getMeasure('mmrc'))).toBe('');
   });
 });
 

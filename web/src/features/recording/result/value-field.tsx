@@ -4,6 +4,7 @@ import { Field } from '../../../ui/field';
 import { RadioGroup } from '../../../ui/radio-group';
 import { TextInput } from '../../../ui/text-input';
 import type { ResultForm } from './result-form';
+import { unitBeside } from './unit-beside';
 
 interface ValueFieldProps {
   measure: Measure;
@@ -44,7 +45,7 @@ export const ValueField = ({ measure, asked }: ValueFieldProps) => {
             if (getValues('value').trim() !== '') void trigger('value');
           },
         })}
-        unit={measure.unit.symbol || undefined}
+        unit={unitBeside(measure) || undefined}
         inputMode="decimal"
         autoComplete="off"
       />

@@ -63,7 +63,7 @@ export const ManeuverCell = ({
       placeholder={placeholder}
       onKeyDown={move}
       className={cx(
-        'h-7 w-full min-w-0 rounded-cell border px-2',
+        'h-8 w-full min-w-0 rounded-cell border px-2',
         left ? 'text-note' : 'text-right',
         edge(error !== undefined, asked),
         best ? 'bg-tarn-wash font-bold' : 'bg-transparent',

@@ -29,12 +29,12 @@ export const ManeuverGrid = ({ set, title, values, questions }: ManeuverGridProp
 
   return (
     <>
-      <div className="overflow-x-auto">
+      <div className="scroll-pl-8 overflow-x-auto">
         <table className="w-full min-w-150 table-fixed border-collapse">
           <VisuallyHidden as="caption">{title}</VisuallyHidden>
           <thead>
             <tr>
-              <th scope="col" className={`${head} w-7 pl-0`}>
+              <th scope="col" className={`${head} sticky left-0 z-1 w-7 bg-surface pl-0`}>
                 <VisuallyHidden>Maneuver</VisuallyHidden>
               </th>
               <th scope="col" className={`${head} text-right`}>

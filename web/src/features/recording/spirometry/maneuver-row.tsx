@@ -63,7 +63,7 @@ export const ManeuverRow = ({ set, index, row, withFef, bestFev1, bestFvc, asked
   const ratio = rowRatio(row.fev1, row.fvc);
   return (
     <tr className="h-8 border-b border-row">
-      <th scope="row" className="pr-2 text-left text-note font-normal text-ink-soft">
+      <th scope="row" className="sticky left-0 z-1 bg-surface pr-2 text-left text-note font-normal text-ink-soft">
         {index + 1}
       </th>
       <td>{cell('fev1', { best: bestFev1, notUsed: !row.fev1Used })}</td>

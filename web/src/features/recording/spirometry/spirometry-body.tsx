@@ -25,14 +25,14 @@ interface SpirometryBodyProps {
 export const SpirometryBody = ({ state, patient, earlierHeight, amending }: SpirometryBodyProps) => {
   const { form, values, questions, tab } = state;
   const { register, formState } = form;
-  const above = questions.filter(({ field }) => setOfField(field) === null);
+  const aboutHeight = questions.filter(({ field }) => field === 'heightCm');
+  const above = questions.filter(({ field }) => field !== 'heightCm' && setOfField(field) === null);
   const answers = {
     onFix: state.fix,
     onStand: state.stand,
     onChangeIt: (question: FormQuestion) => state.goTo(question.field),
   };
-  const heightNote = (question: FormQuestion): string | undefined => {
-    if (question.field !== 'heightCm') return undefined;
+  const heightNote = (): string => {
     return earlierHeight
       ? `Until you answer, percent predicted uses ${formatNumber(earlierHeight.value, 1)} cm from ${formatDayMonth(earlierHeight.on)}.`
       : 'Until you answer there is no percent predicted.';
@@ -40,8 +40,15 @@ export const SpirometryBody = ({ state, patient, earlierHeight, amending }: Spir
 
   return (
     <>
-      <SpirometryFields values={values} questions={questions} amending={amending} />
-      <QuestionList questions={above} noteOf={heightNote} {...answers} />
+      <SpirometryFields
+        values={values}
+        questions={questions}
+        amending={amending}
+        heightQuestion={
+          aboutHeight.length > 0 && <QuestionList questions={aboutHeight} noteOf={heightNote} {...answers} />
+        }
+      />
+      <QuestionList questions={above} {...answers} />
       <SetTabs values={values} tab={tab} onTab={state.setTab}>
         {(set, title) => (
           <div className="flex flex-col gap-3">

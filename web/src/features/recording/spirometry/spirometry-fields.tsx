@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import { useFormContext, type FieldPath } from 'react-hook-form';
 import { DateTimeInput } from '../../../ui/date-input';
 import { Field } from '../../../ui/field';
@@ -12,6 +13,8 @@ interface SpirometryFieldsProps {
   values: SpirometryForm;
   questions: readonly FormQuestion[];
   amending: boolean;
+  /** What is asked about the height, drawn under its row. */
+  heightQuestion: ReactNode;
 }
 
 const labels: Record<FormState, string> = {
@@ -25,8 +28,11 @@ const labels: Record<FormState, string> = {
 const choices = (states: readonly FormState[]) => states.map((value) => ({ value, label: labels[value] }));
 const drugs = ['Albuterol', 'Levalbuterol', 'Ipratropium', 'Albuterol and ipratropium'];
 
+/** On a wide page the question stands between the height's row and the next. */
+const below = 'row:order-2';
+
 /** When, at what height and weight, and what was given: above the tabs. */
-export const SpirometryFields = ({ values, questions, amending }: SpirometryFieldsProps) => {
+export const SpirometryFields = ({ values, questions, amending, heightQuestion }: SpirometryFieldsProps) => {
   const { register, reset, setValue, getValues, trigger, formState } = useFormContext<SpirometryForm>();
   const { errors } = formState;
   const asked = (field: string): string | undefined =>
@@ -55,10 +61,15 @@ export const SpirometryFields = ({ values, questions, amending }: SpirometryFiel
       <Field label="Height is" error={errors.heightMethod?.message}>
         <Select {...register('heightMethod')} choices={heightMethodChoices} />
       </Field>
+      {heightQuestion && (
+        <div className="relative col-span-full before:absolute before:-top-1.5 before:left-6 before:size-4 before:rotate-45 before:bg-gorse-wash row:order-1 row:before:left-[calc((100%-48px)*0.34+40px)]">
+          {heightQuestion}
+        </div>
+      )}
       <Field label="Weight" labelNote="optional" error={errors.weightKg?.message} question={asked('weightKg')}>
         <TextInput {...register('weightKg', check('weightKg'))} unit="kg" inputMode="decimal" autoComplete="off" />
       </Field>
-      <Field label="Bronchodilator" error={errors.state?.message} className="max-row:col-span-2">
+      <Field label="Bronchodilator" error={errors.state?.message} className={`max-row:col-span-2 ${below}`}>
         <Select
           {...register('state')}
           choices={choices(states)}
@@ -77,10 +88,10 @@ export const SpirometryFields = ({ values, questions, amending }: SpirometryFiel
       </Field>
       {given && (
         <>
-          <Field label="Drug" error={errors.drug?.message}>
+          <Field label="Drug" error={errors.drug?.message} className={below}>
             <TextInput {...register('drug')} list="bronchodilator-drugs" autoComplete="off" />
           </Field>
-          <Field label="Dose" error={errors.doseMcg?.message}>
+          <Field label="Dose" error={errors.doseMcg?.message} className={below}>
             <TextInput
               {...register('doseMcg', check('doseMcg'))}
               unit={'\u00b5g'}
@@ -88,7 +99,7 @@ export const SpirometryFields = ({ values, questions, amending }: SpirometryFiel
               autoComplete="off"
             />
           </Field>
-          <Field label="Since the dose" error={errors.minutesSinceDose?.message}>
+          <Field label="Since the dose" error={errors.minutesSinceDose?.message} className={below}>
             <TextInput
               {...register('minutesSinceDose', check('minutesSinceDose'))}
               unit="min"

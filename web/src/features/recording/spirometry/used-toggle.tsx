@@ -13,7 +13,7 @@ export const UsedToggle = ({ path, name }: UsedToggleProps) => {
   const { control, register } = useFormContext<SpirometryForm>();
   const used = useWatch({ control, name: path });
   return (
-    <label className="relative mx-auto flex size-7 cursor-pointer items-center justify-center rounded-cell hover:bg-mist has-focus-visible:outline-2 has-focus-visible:outline-tarn">
+    <label className="relative mx-auto flex size-8 cursor-pointer items-center justify-center rounded-cell hover:bg-mist has-focus-visible:outline-2 has-focus-visible:outline-tarn">
       <input
         {...register(path)}
         type="checkbox"

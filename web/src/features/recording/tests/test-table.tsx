@@ -25,7 +25,7 @@ export const TestTable = ({ patientId, tests }: TestTableProps) => (
           <Cell asHeader>
             <Link
               to={`/patients/${patientId}/tests/${test.kind}/${test.id}`}
-              className="rounded-tag font-semibold text-tarn after:absolute after:inset-0 hover:text-tarn-deep"
+              className="-my-1.25 inline-flex min-h-8 items-center rounded-tag font-semibold text-tarn after:absolute after:inset-0 hover:text-tarn-deep"
             >
               {testName(test)}
             </Link>
