@@ -53,6 +53,14 @@ describe('describeTrend', () => {
     expect(measureTitle(fev1Series, 'value')).toBe('FEV1, liters');
   });
 
+  it('does not repeat a unit that the name already says', () => {
+    expect(describeTrend(mmrcSeries, 'value')).toBe(
+      'mMRC breathlessness grade: baseline 3 on Aug 31, 2026, latest 2 on Oct 12, 2026. ' +
+        'Better by 1 grade, 1 grade down since baseline.',
+    );
+    expect(measureTitle(walkSeries, 'value')).toBe('6-minute walk distance, meters');
+  });
+
   it('speaks of a single test and of none', () => {
     const one = aSeries('cat', [aPoint('2026-08-31', 22)]);
     expect(describeTrend(one, 'value')).toBe(

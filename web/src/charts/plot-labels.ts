@@ -47,8 +47,15 @@ export const llnPath = ({ frame, x, y }: TrendLayout, line: LlnLine): Spot[] => 
 export const markBoxes = (marks: readonly DrawnMark[]): Rect[] =>
   marks.map(({ x, y, r }) => ({ left: x - r - 2, top: y - r - 2, width: 2 * r + 4, height: 2 * r + 4 }));
 
-/** Right of the point where there is room, else above, below, or on the other side of it. */
-const latestLabel = ({ series, view, bands, layout }: LabelRequest, room: LabelRoom): LatestLabel | null => {
+/** Baselines over and under the point, and how far from it its words may begin. */
+const aroundPx = { heights: [-14, 25, -30, 41], aside: 60 };
+
+/** Right of the point where there is room, else above, below, on the other side of it, or up to a vertical. */
+const latestLabel = (
+  { series, view, bands, layout }: LabelRequest,
+  verticals: readonly number[],
+  room: LabelRoom,
+): LatestLabel | null => {
   const shown = layout.marks.find((mark) => mark.point.role === 'latest') ?? layout.marks.at(-1);
   if (!shown) return null;
   const { point, x, y } = shown;
@@ -57,11 +64,19 @@ const latestLabel = ({ series, view, bands, layout }: LabelRequest, room: LabelR
   const rest = layout.narrow ? '' : `${raw}${formatDayMonth(point.takenOn)}`;
   const width = strong.length * 9 + rest.length * 6.8 + 8;
   const beside = [5, -10, 21, -26, 37].map((down) => labelPlace(x + 13, y + down, 'start', width));
-  const over = [-14, 25, -30, 41].flatMap((down) => [
+  const over = aroundPx.heights.flatMap((down) => [
     labelPlace(x + 4, y + down, 'end', width),
     labelPlace(x - 4, y + down, 'start', width),
   ]);
-  const place = freestPlace([...beside, ...over, labelPlace(x - 13, y + 5, 'end', width)], room);
+  const upTo = aroundPx.heights
+    .flatMap((down) =>
+      verticals.flatMap((at) => [
+        labelPlace(at + 6, y + down, 'start', width),
+        labelPlace(at - 6, y + down, 'end', width),
+      ]),
+    )
+    .filter(({ box }) => box.left - x < aroundPx.aside && x - box.left - width < aroundPx.aside);
+  const place = freestPlace([...beside, ...over, labelPlace(x - 13, y + 5, 'end', width), ...upTo], room);
   return place && { ...place, strong, rest };
 };
 
@@ -113,7 +128,7 @@ export const plotLabels = (request: LabelRequest): PlotLabels => {
     ],
     boxes: markBoxes(marks),
   };
-  const latest = latestLabel(request, room);
+  const latest = latestLabel(request, verticals, room);
   const taken = { ...room, boxes: [...room.boxes, ...(latest ? [latest.box] : [])] };
   return { latest, lln: lln && llnLabel(lln, layout, verticals, taken) };
 };

@@ -69,7 +69,10 @@ const useEnrollButton = () => {
   const button = useRef<HTMLButtonElement>(null);
   const { hash, key } = useLocation();
   useEffect(() => {
-    if (hash === enrollHash) button.current?.focus();
+    if (hash !== enrollHash) return undefined;
+    // A new page first brings the focus to its heading.
+    const timer = window.setTimeout(() => button.current?.focus());
+    return () => window.clearTimeout(timer);
   }, [hash, key]);
   return button;
 };

@@ -2,6 +2,7 @@ import { screen, waitFor, within } from '@testing-library/react';
 import { describe, expect, it } from 'vitest';
 import { aTrendResponse } from '../../charts/testing/trend-fixture';
 import { problem } from '../../testing/problem';
+import { courseWords } from './record-words';
 import { aFlag, aPatient } from './testing/record-fixture';
 import { renderRecord } from './testing/render-record';
 
@@ -64,6 +65,49 @@ describe('standing header', () => {
     });
   });
 
+  it('gives the focus to the name when the resolved flag is gone', async () => {
+    const flag = aFlag(1);
+    const world = { patient, writes: { [`/api/flags/${flag.id}/resolve`]: { flag } } };
+    const { user } = renderRecord(details, world);
+    await user.click(await screen.findByRole('button', { name: flag.label }));
+    const card = within(screen.getByRole('dialog', { name: flag.label }));
+    await user.type(card.getByRole('textbox', { name: 'What was done' }), 'Spoke with him');
+    world.patient = aPatient({ openFlags: [] });
+    await user.click(card.getByRole('button', { name: 'Resolve flag' }));
+    await waitFor(() => expect(screen.queryByRole('button', { name: flag.label })).toBeNull());
+    await waitFor(() => expect(screen.getByRole('heading', { level: 1, name: 'Leland Brask' })).toHaveFocus());
+  });
+
+  it('shows an open safety hold, also without the flags, and leads to the file', async () => {
+    const { unmount } = renderRecord(details, { patient: aPatient({ openHolds: 1, openFlags: [] }) });
+    const hold = await screen.findByRole('link', { name: 'Exercise on hold' });
+    expect(hold).toHaveAttribute('href', `/patients/${patient.id}/file`);
+    unmount();
+    renderRecord(details, { patient });
+    await screen.findByRole('heading', { level: 1 });
+    expect(screen.queryByRole('link', { name: 'Exercise on hold' })).toBeNull();
+  });
+
+  it('leads from "Not enrolled" to the button that enrolls, for those who may', async () => {
+    const { user, unmount } = renderRecord(`/patients/${patient.id}/summary`, {
+      patient: aPatient({ enrollment: null }),
+      trends: [aTrendResponse()],
+    });
+    await user.click(await screen.findByRole('link', { name: 'Not enrolled' }));
+    await waitFor(() => expect(screen.getByRole('button', { name: 'Enroll in a program' })).toHaveFocus());
+    unmount();
+    renderRecord(details, { patient: aPatient({ enrollment: null, abilities: [] }) });
+    expect(await screen.findByText('Not enrolled')).toBeVisible();
+    expect(screen.queryByRole('link', { name: 'Not enrolled' })).toBeNull();
+  });
+
+  it('does not say that a planned course starts on a day that has passed', () => {
+    const { enrollment } = patient;
+    const planned = enrollment && { ...enrollment, status: 'planned' as const, startOn: '2026-06-04' };
+    expect(courseWords(planned, '2026-06-04')).toBe('Starts Jun 4, 24 sessions');
+    expect(courseWords(planned, '2026-06-05')).toBe('Planned, Jun 4, 24 sessions');
+  });
+
   it('folds more than three flags, safety first, and lets nobody resolve without the ability', async () => {
     const openFlags = [4, 5, 1, 2].map((number) =>
       aFlag(
@@ -90,14 +134,15 @@ describe('details', () => {
   it('enrolls in a program', async () => {
     const notEnrolled = aPatient({ enrollment: null });
     const path = `/api/patients/${patient.id}/enrollments`;
-    const { user, seen } = renderRecord(details, {
+    const world = {
       patient: notEnrolled,
       programs: [
         program,
         { ...program, id: '00000000-0000-4000-8000-000000000051', name: 'Old course', retired: true },
       ],
       writes: { [path]: { enrollment: aPatient().enrollment } },
-    });
+    };
+    const { user, seen } = renderRecord(details, world);
     expect(await screen.findByText('Not enrolled in a program yet.')).toBeVisible();
     await user.click(screen.getByRole('button', { name: 'Enroll in a program' }));
     const drawer = within(await screen.findByRole('dialog', { name: 'Enroll in a program' }));
@@ -106,8 +151,11 @@ describe('details', () => {
     await user.click(drawer.getByRole('button', { name: 'Enroll' }));
     expect(await drawer.findByText('Choose a program')).toBeVisible();
     await user.selectOptions(drawer.getByRole('combobox', { name: 'Program' }), 'Standard course');
+    world.patient = aPatient();
     await user.click(drawer.getByRole('button', { name: 'Enroll' }));
     expect(await screen.findByText('Enrolled in Standard course')).toBeVisible();
+    // Its button is gone, so the focus is on the section's heading.
+    await waitFor(() => expect(screen.getByRole('heading', { name: 'Enrollment' })).toHaveFocus());
     const sent = seen.find((entry) => entry.path === path)?.body as Record<string, unknown>;
     expect(sent).toMatchObject({ programId: program.id, consentOn: null });
     expect(sent.id).toMatch(/^[0-9a-f-]{36}$/);
@@ -126,6 +174,7 @@ describe('details', () => {
     await user.type(drawer.getByRole('textbox', { name: 'Reason' }), 'Chest infection');
     await user.click(drawer.getByRole('button', { name: 'Save changes' }));
     expect(await screen.findByText('Enrollment changed')).toBeVisible();
+    await waitFor(() => expect(screen.getByRole('button', { name: 'Change enrollment' })).toHaveFocus());
     expect(seen.find((entry) => entry.path === path)?.body).toMatchObject({
       version: 2,
       status: 'paused',

@@ -1,4 +1,4 @@
-import { screen, within } from '@testing-library/react';
+import { screen, waitFor, within } from '@testing-library/react';
 import { describe, expect, it } from 'vitest';
 import { aPoint, aSeries, aTrendResponse, fev1Series, walkSeries } from '../../charts/testing/trend-fixture';
 import { problem } from '../../testing/problem';
@@ -118,7 +118,11 @@ describe('summary', () => {
   });
 
   it('looks by another rule in the address only, and asks the group of a legacy set', async () => {
-    const { user, seen, address } = renderRecord(summary, { patient, trends: [aTrendResponse()] });
+    const usual = aTrendResponse();
+    const legacy = aTrendResponse({
+      pattern: usual.pattern && { ...usual.pattern, values: { ...usual.pattern.values, referenceSet: 'gli-2012' } },
+    });
+    const { user, seen, address } = renderRecord(summary, { patient, trends: [usual, legacy, usual] });
     await user.click(await screen.findByRole('button', { name: 'Change rule' }));
     await user.selectOptions(await screen.findByRole('combobox', { name: 'Reference set for spirometry' }), 'gli-2012');
     await user.click(screen.getByRole('button', { name: 'Show' }));
@@ -128,13 +132,28 @@ describe('summary', () => {
     await user.click(screen.getByRole('radio', { name: /^GOLD/ }));
     await user.click(screen.getByRole('button', { name: 'Show' }));
     expect(await screen.findByText(/These are not your clinic’s rules/)).toBeVisible();
+    await waitFor(() => expect(screen.getByRole('button', { name: 'Change rule' })).toHaveFocus());
     expect(seen.filter((entry) => entry.path.endsWith('/trends')).at(-1)?.query).toEqual({
       referenceSet: 'gli-2012',
       group: 'other',
       gradingRule: 'gold',
     });
+    expect(await screen.findByText(/after bronchodilator, GLI 2012, group Other or mixed\./)).toBeVisible();
     await user.click(screen.getByRole('button', { name: 'Back to the clinic’s rules' }));
+    expect(screen.getByRole('button', { name: 'Change rule' })).toHaveFocus();
     expect(address()).toBe(summary);
+  });
+
+  it('says on a line what stands for a measure without a change: its baseline and state', async () => {
+    const points = [
+      aPoint('2026-08-31', 3.1, { state: 'after', role: 'baseline' }),
+      aPoint('2026-10-12', 2.9, { state: 'before', compared: false, reason: 'taken before bronchodilator' }),
+    ];
+    const fvc = aSeries('fvc', points, { unit: 'L', state: 'after' });
+    renderRecord(summary, { patient, trends: [aTrendResponse({ series: [walkSeries, fvc] })] });
+    const line = within(await screen.findByRole('region', { name: 'Also on record' })).getByRole('button');
+    expect(line).toHaveTextContent('3.10 L');
+    expect(line).toHaveTextContent('after bronchodilator, Aug 31');
   });
 
   it('starts empty with one button', async () => {
