@@ -42,20 +42,24 @@ export const trendPoint = z.object({
   zApproximate: number.optional(),
   lln: number,
   band: z.string().nullable(),
-  bandLabel: z.string().nullable(),
+  /** Present when it differs from the label of the band. */
+  bandLabel: z.string().optional(),
   graded: z.boolean(),
   state: z.enum(bronchodilatorStates).nullable(),
   quality: z.string().nullable(),
   compared: z.boolean(),
-  role: z.enum(['baseline', 'latest']).nullable(),
+  role: z.enum(['baseline', 'latest']).optional(),
   reason: z.string().optional(),
   heightCm: number,
-  heightMethod: z.string().nullable(),
+  /** Present when the height was not measured. */
+  heightMethod: z.string().optional(),
   /** Present when the height is that of an earlier visit. */
   heightCarried: z.literal(true).optional(),
   ageYears: z.number(),
-  conditions: z.record(z.string(), z.unknown()),
-  sourceKind: z.string(),
+  /** Present when any were recorded. */
+  conditions: z.record(z.string(), z.unknown()).optional(),
+  /** Absent for a measurement entered by itself. */
+  sourceKind: z.string().optional(),
   sourceId: uuid,
 });
 

@@ -66,7 +66,7 @@ const conditionSentence = (series: TrendSeries, point: TrendPoint): string | nul
   if (!isMeasureId(series.measure)) return null;
   const declared = Object.entries(getMeasure(series.measure).conditions);
   const words = declared.flatMap(([key, condition]) => {
-    const value = point.conditions[key];
+    const value = point.conditions?.[key];
     if (value === undefined || value === null || value === condition.default) return [];
     const choice = condition.choices?.indexOf(String(value)) ?? -1;
     const text =

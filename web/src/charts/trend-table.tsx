@@ -4,6 +4,7 @@ import type { TrendPoint, TrendSeries } from '@slighthill/shared/contracts/trend
 import { formatDate } from '../lib/clinic-time';
 import { Icon } from '../ui/icon';
 import { Cell, HeaderCell, Row, Table, TableBody, TableHead } from '../ui/table';
+import { bandLabel } from './band-label';
 import { describeTrend } from './describe-trend';
 import { formatInView, formatResult } from './format-measure';
 import { capitalize, stateWords } from './rule-words';
@@ -88,7 +89,7 @@ export const TrendTable = ({ series, view, hrefOf }: TrendTableProps) => {
                   {point.lln === null ? dash : formatResult(measure, point.lln, unit)}
                 </Cell>
               )}
-              {graded && <Cell label="Band">{point.graded && point.bandLabel ? point.bandLabel : dash}</Cell>}
+              {graded && <Cell label="Band">{(point.graded && bandLabel(series, point)) || dash}</Cell>}
               {hasStates && <Cell label="State">{point.state ? capitalize(stateWords[point.state]) : dash}</Cell>}
               <Cell label="Compared" className={point.compared ? '' : 'text-ink-soft'}>
                 {standing(point)}

@@ -1,4 +1,4 @@
-import { obstructivePatterns, patternOf, type PatternId } from './pattern-of';
+import { patternOf, type PatternId } from './pattern-of';
 import { patternHeading, patternLabels, type RatioRule } from './pattern-words';
 import { isPrism } from './prism';
 import { severityOf, type Severity } from './severity-of';
@@ -18,6 +18,8 @@ export interface PatternTest {
   fev1: Judged;
   fvc: Judged;
   tlc: Judged | null;
+  /** Why a TLC that was measured could not be held to a prediction. */
+  tlcUnjudged?: string | null;
   state: BronchodilatorState;
 }
 
@@ -105,12 +107,10 @@ function notesOf(test: PatternTest, id: PatternId, severityNote: string | null):
     tlc.percentPredicted - fvc.percentPredicted > 10;
   return [
     stateNotes[test.state],
-    tlc === null ? 'No TLC, so restriction cannot be judged.' : null,
+    tlc === null ? `${test.tlcUnjudged ?? 'No TLC'}, so restriction cannot be judged.` : null,
     severityNote,
     prism ? 'Preserved ratio with impaired FEV1 (PRISm): ratio 0.70 or more, FEV1 under 80% of predicted.' : null,
     complex ? 'Complex restriction: FVC is more than 10 percentage points below TLC.' : null,
     id === 'obstruction-fev1-normal' ? 'FEV1 is within normal limits; a low ratio alone can be dysanapsis.' : null,
   ].filter((note) => note !== null);
 }
-
-export const isObstructive = (id: PatternId): boolean => id === 'mixed' || obstructivePatterns.includes(id);

@@ -26,7 +26,6 @@ const defaults: Record<ReferenceKind, ReferenceSetId> = {
 
 export const referenceSets: readonly ReferenceSet[] = referenceSetIds.map((id) => byId[id]);
 export const getReferenceSet = (id: ReferenceSetId): ReferenceSet => byId[id];
-export const isReferenceSetId = (id: string): id is ReferenceSetId => Object.hasOwn(byId, id);
 export const defaultReferenceSet = (kind: ReferenceKind): ReferenceSet => byId[defaults[kind]];
 
 /** The set used for a measure: the chosen one where it is of the measure's kind, else the default of that kind. */

@@ -30,7 +30,8 @@ export function predict(
   const found = set.evaluate(measure, person as ReferencePerson);
   // A linear equation can fall to 0 at the ends of height and weight, where it says nothing any more.
   if (!(found.predicted > 0)) return { computable: false, reason: 'size-outside-set' };
-  return { computable: true, ...found };
+  const { predicted, lln, uln, lms } = found;
+  return { computable: true, predicted, lln, uln, lms };
 }
 
 function whyNot(

@@ -41,8 +41,8 @@ export function computeSeries(
     includeLowQuality,
     gradesFev1: patterns.gradesFev1,
   };
-  const evaluated = shown.map((result) => ({ result, evaluation: evaluator.evaluate(result) }));
-  const points = evaluated.map(({ result, evaluation }) => pointOf(result, evaluation, context));
+  const evaluations = shown.map((result) => evaluator.evaluate(result));
+  const points = shown.map((result, index) => pointOf(result, evaluations[index]!, context));
   const { baseline, latest, note } = comparable.pair;
   const set = evaluator.setOf(id);
   const changed = baseline && latest ? changeOf(measure, baseline, latest, person.diagnosisGroup) : null;
@@ -66,7 +66,7 @@ export function computeSeries(
       ...noPairNotes(comparable, window.lastAllowedOn),
       ...(baseline && latest ? pairNotes(measure, baseline, latest, input.exacerbationOnsets) : []),
       ...(changed?.notes ?? []),
-      ...predictionNotes(evaluated, set, person.sexForPrediction),
+      ...predictionNotes(evaluations, set, person.sexForPrediction),
       ...(rateNote && points.length > 0 ? [rateNote] : []),
     ],
   };

@@ -62,6 +62,29 @@ describe('which test decides the pattern (rule GR-0)', () => {
     expect(patternOf([...test, near, nearer])).toMatchObject({ id: 'mixed', tlcMeasurementId: nearer.sourceId });
   });
 
+  it('says of a TLC without a prediction why restriction cannot be judged', () => {
+    const test = spirometry('2026-06-30', 1.3, 2.4);
+    const noHeight = result('tlc', '2026-06-01', 7.5, { heightCm: null, heightMethod: null });
+    const pattern = patternOf([...test, noHeight]);
+    expect(pattern).toMatchObject({ id: 'obstruction-possible-mixed', tlcMeasurementId: noHeight.sourceId });
+    expect(pattern?.notes).toContain(
+      'TLC of Jun 1, 2026 has no predicted value (no measured height up to 12 months earlier), so restriction cannot be judged.',
+    );
+    expect(pattern?.notes.join(' ')).not.toContain('No TLC');
+    // GLI 2021 lung volumes end at 80 years (Hall 2021, ERJ 57:2000289), the spirometry equations at 95.
+    const person = {
+      birthDate: '1940-01-01',
+      sexForPrediction: 'male',
+      diagnosisGroup: 'copd',
+      diagnosisConfirmed: true,
+    } as const;
+    const old = patternOf([...test, result('tlc', '2026-06-01', 7.5)], {}, { person });
+    expect(old?.notes).toContain(
+      'TLC of Jun 1, 2026 has no predicted value (age is outside the reference set), so restriction cannot be judged.',
+    );
+    expect(patternOf(test)?.notes).toContain('No TLC, so restriction cannot be judged.');
+  });
+
   it('carries the numbers it rests on', () => {
     const pattern = patternOf([...spirometry('2026-01-01', 1.32, 3.3), result('tlc', '2026-01-01', 7.5)]);
     expect(pattern?.values).toMatchObject({ ratio: 1.32 / 3.3, referenceSet: 'gli-global-2022', state: 'after' });
@@ -124,7 +147,8 @@ describe('bands and grades of points (rule GR-0)', () => {
         { person: woman },
       ).series[0]?.points[0];
     expect(tlcAt(0.81)).toMatchObject({ bandLabel: 'mild (LLN)', graded: true });
-    expect(tlcAt(0.75)).toMatchObject({ band: 'mild', bandLabel: 'mild', graded: true });
+    expect(tlcAt(0.75)).toMatchObject({ band: 'mild', graded: true });
+    expect(tlcAt(0.75)).not.toHaveProperty('bandLabel');
     expect(tlcAt(0.9)).toMatchObject({ band: 'normal', graded: false });
   });
 
@@ -193,6 +217,18 @@ describe('one reference set per series, age and height of each test (rules TR-2,
     const [series] = trends(spirometry('2026-01-01', 1, 2), {}, { person }).series;
     expect(series?.points[0]).toMatchObject({ predicted: null, reason: 'age is outside the reference set' });
   });
+});
+
+it('leaves out of a point what says nothing new, and only that', () => {
+  const extras = ['role', 'bandLabel', 'heightMethod', 'heightCarried', 'conditions', 'sourceKind', 'reason'] as const;
+  const cats = ['2026-01-01', '2026-02-01', '2026-03-01'].map((day) => result('cat', day, 22));
+  const middle = trends(cats, { measures: ['cat'] }).series[0]?.points[1];
+  for (const extra of extras) expect(middle).not.toHaveProperty(extra);
+  const more = { heightMethod: 'stated', heightCarried: true, conditions: { courseM: 30 }, sourceKind: 'derived' };
+  const walk = trends([result('sixMinuteWalkDistance', '2026-01-01', 300, { ...more, weightKg: null })], {
+    measures: ['sixMinuteWalkDistance'],
+  }).series[0]?.points[0];
+  expect(walk).toMatchObject({ ...more, role: 'baseline', reason: 'no weight was entered with the test' });
 });
 
 it('keeps to the contract of the response', () => {

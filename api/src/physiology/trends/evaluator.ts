@@ -18,6 +18,13 @@ export interface Evaluator {
   evaluate: (result: TrendMeasurement) => Evaluation;
 }
 
+const without = (ageYears: number, reason: NotPredictable): Evaluation => ({
+  ageYears,
+  prediction: null,
+  assessed: null,
+  reason,
+});
+
 /**
  * Holds results to one reference set per kind, with the age and height of each test (rule TR-2). Each result is worked
  * out once, however many series and patterns look at it.
@@ -25,29 +32,28 @@ export interface Evaluator {
 export function createEvaluator({ person, options }: Pick<TrendInput, 'person' | 'options'>): Evaluator {
   const chosen = options.referenceSet ? getReferenceSet(options.referenceSet) : null;
   const born = dayNumber(person.birthDate);
-  const known = new Map<string, Evaluation>();
+  const known = new Map<TrendMeasurement, Evaluation>();
   const setOf: Evaluator['setOf'] = (measure) => referenceSetFor(measure, getMeasure(measure).referenceKind, chosen);
 
   function workOut(result: TrendMeasurement): Evaluation {
     const ageYears = (dayNumber(result.takenOn) - born) / 365.25;
-    const none = { ageYears, prediction: null, assessed: null };
     const set = setOf(result.measure);
-    if (!set) return { ...none, reason: 'no-equation' };
-    if (ageYears < predictionAges.from || ageYears > predictionAges.to) return { ...none, reason: 'age-outside-set' };
+    if (!set) return without(ageYears, 'no-equation');
+    if (ageYears < predictionAges.from || ageYears > predictionAges.to) return without(ageYears, 'age-outside-set');
     const { heightCm, weightKg } = result;
     const subject = { sex: person.sexForPrediction, ageYears, heightCm, weightKg, group: options.group };
     const prediction = predict(set, result.measure, subject);
-    if (!prediction.computable) return { ...none, reason: prediction.reason };
+    if (!prediction.computable) return without(ageYears, prediction.reason);
     // A score or a distance of 0 has no z; its prediction is still shown.
     const assessed = result.value > 0 ? assess(result.value, prediction) : null;
     return { ageYears, prediction, assessed, reason: null };
   }
 
   function evaluate(result: TrendMeasurement): Evaluation {
-    const found = known.get(result.id);
+    const found = known.get(result);
     if (found) return found;
     const evaluation = workOut(result);
-    known.set(result.id, evaluation);
+    known.set(result, evaluation);
     return evaluation;
   }
 

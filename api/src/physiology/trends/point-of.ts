@@ -1,7 +1,7 @@
 import type { Measure } from '@slighthill/shared/measures';
 import { bandOf } from '../grading/band-of';
 import { quantityOf } from '../grading/quantity-of';
-import type { Band, GradingRule } from '../grading/types';
+import type { GradingRule } from '../grading/types';
 import { mildByLln } from '../pattern/severity-of';
 import { isGraded } from '../prediction/grades-of';
 import { blockingDifference, blockingKey } from './condition-words';
@@ -32,34 +32,25 @@ export function notComparedReason(result: TrendMeasurement, context: PointContex
   return measure.sameDay === 'best' ? 'the best of the day counts' : 'the last of the day counts';
 }
 
-function bandsOfPoint(
-  result: TrendMeasurement,
-  evaluation: Evaluation,
-  { rule, gradesFev1 }: PointContext,
-): { band: Band | null; bandLabel: string | null; graded: boolean } {
-  const { assessed } = evaluation;
-  const gradable = {
-    value: result.value,
-    percentPredicted: assessed?.percentPredicted ?? null,
-    z: assessed?.z ?? null,
-  };
-  const quantity = rule && quantityOf(rule.quantity, gradable);
-  if (rule === null || quantity === null) return { band: null, bandLabel: null, graded: false };
+/** Sets band and grade on a point, where the rule has a number to look at. */
+function grade(point: TrendPoint, belowLln: boolean | null, { rule, gradesFev1 }: PointContext): void {
+  const quantity = rule && quantityOf(rule.quantity, point);
+  if (rule === null || quantity === null) return;
   const band = bandOf(rule, quantity);
-  const belowLln = assessed?.belowLln ?? null;
-  const mild = rule.id === 'tlc-percent' && band.id === 'normal' && belowLln === true;
-  const graded =
-    rule.gradedWhen === 'abnormal-pattern' ? gradesFev1(result.sourceId) : isGraded(rule, quantity, belowLln);
-  return { band, bandLabel: mild ? mildByLln.label : band.label, graded };
+  point.band = band.id;
+  if (rule.id === 'tlc-percent' && band.id === 'normal' && belowLln === true) point.bandLabel = mildByLln.label;
+  point.graded =
+    rule.gradedWhen === 'abnormal-pattern' ? gradesFev1(point.sourceId) : isGraded(rule, quantity, belowLln);
+}
+
+function hasAny(conditions: TrendMeasurement['conditions']): boolean {
+  for (const _key in conditions) return true;
+  return false;
 }
 
 export function pointOf(result: TrendMeasurement, evaluation: Evaluation, context: PointContext): TrendPoint {
   const { prediction, assessed, ageYears } = evaluation;
-  const { band, bandLabel, graded } = bandsOfPoint(result, evaluation, context);
   const notCompared = notComparedReason(result, context);
-  const noPrediction = evaluation.reason && context.measure.referenceKind ? predictionReasons[evaluation.reason] : null;
-  const reason = notCompared ?? noPrediction;
-  const { pair } = context.comparable;
   const point: TrendPoint = {
     takenAt: result.takenAt,
     takenOn: result.takenOn,
@@ -68,22 +59,31 @@ export function pointOf(result: TrendMeasurement, evaluation: Evaluation, contex
     percentPredicted: assessed?.percentPredicted ?? null,
     z: assessed?.z ?? null,
     lln: prediction?.lln ?? null,
-    band: band?.id ?? null,
-    bandLabel,
-    graded,
+    band: null,
+    graded: false,
     state: context.measure.usesBronchodilatorState ? stateOf(context.measure, result) : result.state,
     quality: result.quality,
     compared: notCompared === null,
-    role: result === pair.baseline ? 'baseline' : result === pair.latest ? 'latest' : null,
     heightCm: result.heightCm,
-    heightMethod: result.heightMethod,
     ageYears,
-    conditions: result.conditions,
-    sourceKind: result.sourceKind,
     sourceId: result.sourceId,
   };
+  grade(point, assessed?.belowLln ?? null, context);
+  addExtras(point, result, context);
   if (assessed?.zApproximate != null) point.zApproximate = assessed.zApproximate;
-  if (result.heightCarried) point.heightCarried = true;
+  const noPrediction = evaluation.reason && context.measure.referenceKind ? predictionReasons[evaluation.reason] : null;
+  const reason = notCompared ?? noPrediction;
   if (reason !== null) point.reason = reason;
   return point;
+}
+
+/** Only what says something new is written to a point; a field set to undefined would cost as much as a number. */
+function addExtras(point: TrendPoint, result: TrendMeasurement, { comparable }: PointContext): void {
+  const { baseline, latest } = comparable.pair;
+  if (result === baseline) point.role = 'baseline';
+  else if (result === latest) point.role = 'latest';
+  if (result.heightMethod !== null && result.heightMethod !== 'measured') point.heightMethod = result.heightMethod;
+  if (result.heightCarried) point.heightCarried = true;
+  if (hasAny(result.conditions)) point.conditions = result.conditions;
+  if (result.sourceKind !== 'measurement') point.sourceKind = result.sourceKind;
 }

@@ -3,7 +3,7 @@ import type { ReferenceSet } from '../reference-sets/types';
 import type { Comparable } from './comparable';
 import { predictionReasons } from './reasons';
 import type { Evaluation } from './evaluator';
-import type { TrendMeasurement, TrendPoint } from './types';
+import type { TrendPoint } from './types';
 
 const sameDay = ['the best of the day counts', 'the last of the day counts'];
 const points = (count: number) => (count === 1 ? '1 point' : `${count} points`);
@@ -29,23 +29,19 @@ export function noPairNotes({ days, pair }: Comparable, lastAllowedOn: string | 
 }
 
 /** Points without a percent predicted, and the age at which NHANES III changes its equation (rule TR-7). */
-export function predictionNotes(
-  results: readonly { result: TrendMeasurement; evaluation: Evaluation }[],
-  set: ReferenceSet | null,
-  sex: string,
-): string[] {
+export function predictionNotes(evaluations: readonly Evaluation[], set: ReferenceSet | null, sex: string): string[] {
   if (!set) return [];
   const counts = new Map<string, number>();
-  for (const { evaluation } of results)
-    if (evaluation.reason) {
-      const words = predictionReasons[evaluation.reason];
+  for (const { reason } of evaluations)
+    if (reason) {
+      const words = predictionReasons[reason];
       counts.set(words, (counts.get(words) ?? 0) + 1);
     }
   const notes = [...counts].map(([words, count]) => `No percent predicted for ${points(count)}: ${words}.`);
-  const ages = results.map(({ evaluation }) => evaluation.ageYears);
-  if (set.id === 'nhanes-iii-1999' && sex === 'male' && Math.min(...ages) < 20 && Math.max(...ages) >= 20)
+  if (set.id !== 'nhanes-iii-1999' || evaluations.length === 0) return notes;
+  const isUnder20 = ({ ageYears }: Evaluation) => ageYears < 20;
+  if (sex === 'male' && evaluations.some(isUnder20) && !evaluations.every(isUnder20))
     notes.push('NHANES III changes its equation at the 20th birthday, which lies within this series.');
-  if (set.id === 'nhanes-iii-1999' && results.length > 0)
-    notes.push('NHANES III publishes no z-score; the one shown is approximate.');
+  notes.push('NHANES III publishes no z-score; the one shown is approximate.');
   return notes;
 }

@@ -1,8 +1,9 @@
-import { daysBetween } from '@slighthill/shared/calendar';
+import { dateInWords, daysBetween } from '@slighthill/shared/calendar';
 import type { BronchodilatorState, Judged, PatternTest } from '../pattern/judge-pattern';
 import { isBelowFixedRatio } from '../spirometry/fixed-ratio';
 import { qualityCounts } from './comparable';
 import type { Evaluator } from './evaluator';
+import { predictionReasons } from './reasons';
 import type { TrendMeasurement } from './types';
 
 /** The results of one spirometry test that a pattern rests on. */
@@ -19,12 +20,16 @@ export interface SpirometryTest {
 
 /** Complete tests, oldest first. */
 export function spirometryTests(measurements: readonly TrendMeasurement[]): SpirometryTest[] {
-  const bySource = new Map<string, Partial<Record<string, TrendMeasurement>>>();
+  const bySource = new Map<string, Record<'fev1' | 'fvc' | 'fev1fvc', TrendMeasurement | null>>();
   for (const result of measurements) {
-    if (result.measure !== 'fev1' && result.measure !== 'fvc' && result.measure !== 'fev1fvc') continue;
-    const parts = bySource.get(result.sourceId) ?? {};
-    parts[result.measure] = result;
-    bySource.set(result.sourceId, parts);
+    const { measure, sourceId } = result;
+    if (measure !== 'fev1' && measure !== 'fvc' && measure !== 'fev1fvc') continue;
+    let parts = bySource.get(sourceId);
+    if (!parts) {
+      parts = { fev1: null, fvc: null, fev1fvc: null };
+      bySource.set(sourceId, parts);
+    }
+    parts[measure] = result;
   }
   const tests: SpirometryTest[] = [];
   for (const [sourceId, { fev1, fvc, fev1fvc }] of bySource) {
@@ -56,6 +61,11 @@ export function judged(evaluator: Evaluator, result: TrendMeasurement): Judged |
   return { value: result.value, percentPredicted, z, belowLln };
 }
 
+function tlcUnjudged(tlc: TrendMeasurement, evaluator: Evaluator): string | null {
+  const { reason } = evaluator.evaluate(tlc);
+  return reason && `TLC of ${dateInWords(tlc.takenOn)} has no predicted value (${predictionReasons[reason]})`;
+}
+
 /** One test as the pattern rules look at it, or null where its values have no prediction. */
 export function patternTest(
   test: SpirometryTest,
@@ -72,6 +82,7 @@ export function patternTest(
     fev1,
     fvc,
     tlc: tlc && judged(evaluator, tlc),
+    tlcUnjudged: tlc && tlcUnjudged(tlc, evaluator),
     state: test.state,
   };
 }

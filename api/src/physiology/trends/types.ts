@@ -29,7 +29,6 @@ export interface TrendMeasurement {
   weightKg: number | null;
   sourceKind: string;
   sourceId: string;
-  version: number;
 }
 
 export interface TrendEnrollment {
@@ -69,6 +68,7 @@ export interface TrendInput {
   options: TrendOptions;
 }
 
+/** What may be absent is left out where it says nothing new: a long record is mostly such points. */
 export interface TrendPoint {
   takenAt: string;
   takenOn: string;
@@ -79,21 +79,25 @@ export interface TrendPoint {
   zApproximate?: number;
   lln: number | null;
   band: string | null;
-  bandLabel: string | null;
+  /** Only where it differs from the label of the band. */
+  bandLabel?: string;
   graded: boolean;
   state: BronchodilatorState | null;
   quality: string | null;
   compared: boolean;
-  role: 'baseline' | 'latest' | null;
+  role?: 'baseline' | 'latest';
   /** Why the point is not compared, or why it has no prediction. */
   reason?: string;
   heightCm: number | null;
-  heightMethod: string | null;
-  /** Present when the height is that of an earlier visit. */
+  /** Only where it was not measured. */
+  heightMethod?: string;
+  /** Only where the height is that of an earlier visit. */
   heightCarried?: true;
   ageYears: number;
-  conditions: Readonly<Record<string, unknown>>;
-  sourceKind: string;
+  /** Only where any were recorded. */
+  conditions?: Readonly<Record<string, unknown>>;
+  /** Only where it is no measurement entered by itself. */
+  sourceKind?: string;
   sourceId: string;
 }
 

@@ -66,7 +66,8 @@ export const TrendPanel = ({ trends, series, view, headingRef }: TrendPanelProps
   const shown = view.viewOf(series);
   const views = availableViews(series);
   const abnormal = trends.pattern !== null && trends.pattern.id !== 'normal';
-  const hrefOf = (point: TrendPoint): string => `/patients/${patient.id}/tests/${point.sourceKind}/${point.sourceId}`;
+  const hrefOf = (point: TrendPoint): string =>
+    `/patients/${patient.id}/tests/${point.sourceKind ?? 'measurement'}/${point.sourceId}`;
   return (
     <section aria-label="Trend" className="mt-6 print:mt-3">
       <div className="flex flex-wrap items-center gap-x-5 gap-y-2 pb-3 print:pb-0">

@@ -31,7 +31,6 @@ export function result(
     weightKg: 80,
     sourceKind: spirometry ? 'spirometry-test' : 'measurement',
     sourceId: uuidOf(serial),
-    version: 1,
     ...more,
   };
 }
