@@ -33,17 +33,17 @@ export const trendPersonSql = /* sql */ `
       where f.patient_id = p.id and f.kind = 'exacerbation' and f.voided_at is null), '[]') as "exacerbationOnsets"
   from patients p where p.id = $patientId and p.clinic_id = $clinicId`;
 
-/** One indexed statement reads every current point, oldest first. */
+/** One indexed statement reads every current point, oldest first; of one instant the one recorded last comes last. */
 export const trendMeasurementsSql = /* sql */ `
   select id, measure, to_char(taken_at at time zone 'UTC', 'YYYY-MM-DD"T"HH24:MI:SS.MS"Z"') as "takenAt",
     to_char(taken_at at time zone $timeZone, 'YYYY-MM-DD') as "takenOn",
     value, state, conditions, quality, height_cm::float8 as "heightCm", height_method as "heightMethod",
     height_carried as "heightCarried", weight_kg::float8 as "weightKg", source_kind as "sourceKind",
-    source_id as "sourceId", version
+    source_id as "sourceId"
   from measurements
   where patient_id = $patientId and clinic_id = $clinicId and voided_at is null
     and ($measures::text[] is null or measure = any ($measures::text[]))
-  order by taken_at, id`;
+  order by taken_at, created_at, id`;
 
 interface PersonRow {
   id: string;
