@@ -55,7 +55,7 @@ describe('what each role finds', () => {
 
     const { page } = await visit({ as: 'pulmonologist' });
     await page.goto(`/patients/${id}/file`);
-    await page.getByText('On hold').waitFor();
+    await page.getByText('On hold', { exact: true }).waitFor();
     await page.getByRole('button', { name: 'Release Unexplained faint' }).click();
     const asked = dialog(page, 'Release this hold?');
     await asked.getByRole('button', { name: 'Release it' }).click();
