@@ -31,6 +31,7 @@ export function predictionPattern(
       fev1,
       fvc,
       tlc: known(judged.tlc),
+      tlcUnjudged: judged.tlc?.value != null ? 'TLC has no predicted value' : null,
       state: request.bronchodilator ?? 'unknown',
     },
     rules,

@@ -68,6 +68,15 @@ describe('predictions', () => {
     expect(respond({ values: { fev1: 2.904, fvc: 4.15 } }).pattern?.lowByFixedRatio).toBe(true);
   });
 
+  it('say of a TLC without a prediction that it was not left out', () => {
+    // GLI 2021 lung volumes end at 80 years (Hall 2021, ERJ 57:2000289).
+    const values = { fev1: 1.32, fvc: 2.1, tlc: 7.4 };
+    const { pattern } = respond({ ageYears: 85, values, bronchodilator: 'after' });
+    expect(pattern?.notes).toContain('TLC has no predicted value, so restriction cannot be judged.');
+    const without = respond({ ageYears: 85, values: { fev1: 1.32, fvc: 2.1 }, bronchodilator: 'after' }).pattern;
+    expect(without?.notes).toContain('No TLC, so restriction cannot be judged.');
+  });
+
   it('say why there is no prediction', () => {
     const old = respond({ ageYears: 96, values: { fev1: 1, fvc: 2 } });
     expect(old.measures.fev1).toMatchObject({ predicted: null, lln: null, reason: 'age-outside-set', value: 1 });
