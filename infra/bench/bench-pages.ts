@@ -11,33 +11,29 @@ export async function benchPages(executablePath: string, base: string, clinic: B
   });
   try {
     const signIn = await scriptsOf(browser, `${base}/sign-in`, null, 'form');
-    const record = await scriptsOf(browser, `${base}/patients/${clinic.patientId}`, clinic.cookie, 'h1');
-    const first = record.filter((script) => !script.isChart);
+    const record = await scriptsOf(browser, `${base}/patients/${clinic.patientId}`, clinic.cookie, firstChart);
     return [
       row('sign-in page, script of the first load', signIn, 130),
-      row('record page, script of the first load, charts on demand', first, 190),
-      row('record page with its charts', record, 240),
+      row('record page, all script until its first chart stands', record, 190),
     ];
   } finally {
     await browser.close();
   }
 }
 
-interface Script {
-  kb: number;
-  isChart: boolean;
-}
+/** The large chart of the record page, drawn. */
+const firstChart = '[aria-label="Trend"] svg [data-mark]';
 
-async function scriptsOf(browser: Browser, url: string, cookie: string | null, until: string): Promise<Script[]> {
+async function scriptsOf(browser: Browser, url: string, cookie: string | null, until: string): Promise<number[]> {
   const context = await browser.newContext();
   if (cookie) {
     const [name, value] = cookie.split('=');
     await context.addCookies([{ name: name!, value: value!, url }]);
   }
   const page = await context.newPage();
-  const scripts: Promise<Script>[] = [];
+  const scripts: Promise<number>[] = [];
   page.on('response', (response) => {
-    if (new URL(response.url()).pathname.endsWith('.js')) scripts.push(sizeOf(response.url(), response.body()));
+    if (new URL(response.url()).pathname.endsWith('.js')) scripts.push(sizeOf(response.body()));
   });
   await page.goto(url);
   await page.locator(until).first().waitFor();
@@ -48,12 +44,13 @@ async function scriptsOf(browser: Browser, url: string, cookie: string | null, u
   return sizes;
 }
 
-async function sizeOf(url: string, body: Promise<Buffer>): Promise<Script> {
-  return { kb: gzipSync(await body, { level: 9 }).length / 1000, isChart: /chart|trend|visx/i.test(url) };
+/** In gzip kB. */
+async function sizeOf(body: Promise<Buffer>): Promise<number> {
+  return gzipSync(await body, { level: 9 }).length / 1000;
 }
 
-function row(what: string, scripts: readonly Script[], limitKb: number): BenchRow {
-  const kb = scripts.reduce((sum, script) => sum + script.kb, 0);
+function row(what: string, scripts: readonly number[], limitKb: number): BenchRow {
+  const kb = scripts.reduce((sum, script) => sum + script, 0);
   return {
     what,
     measured: `${kb.toFixed(1)} kB gzip`,
