@@ -6,7 +6,7 @@ import { EmptyState } from '../ui/empty-state';
 
 /** Also for what belongs to another clinic: there is nothing here for this person. */
 export const NotFoundPage = () => {
-  usePageTitle('Not found');
+  usePageTitle(translate('error.not-found'));
   const isPatient = useSessionUser().patientId !== null;
   return (
     // A patient's pages stand in a narrow column that has its own sides.

@@ -66,7 +66,8 @@ export const ManeuverRow = ({ set, index, row, withFef, bestFev1, bestFvc, asked
       <th scope="row" className="sticky left-0 z-1 bg-surface pr-2 text-left text-note font-normal text-ink-soft">
         {index + 1}
       </th>
-      <td>{cell('fev1', { best: bestFev1, notUsed: !row.fev1Used })}</td>
+      {/* Room for the focus ring beside the number that stays. */}
+      <td className="pl-0.5">{cell('fev1', { best: bestFev1, notUsed: !row.fev1Used })}</td>
       <td>{cell('fvc', { best: bestFvc, notUsed: !row.fvcUsed })}</td>
       <td className="px-2 text-right text-ink-soft">{ratio === null ? '' : formatNumber(ratio, 2)}</td>
       <td>{cell('pef')}</td>
