@@ -28,7 +28,8 @@ async function scriptsOf(browser: Browser, url: string, cookie: string | null, u
   const context = await browser.newContext();
   if (cookie) {
     const [name, value] = cookie.split('=');
-    await context.addCookies([{ name: name!, value: value!, url }]);
+    // of the whole site: given a page's address the cookie would hold for its folder alone
+    await context.addCookies([{ name: name!, value: value!, url: new URL(url).origin }]);
   }
   const page = await context.newPage();
   const scripts: Promise<number>[] = [];
