@@ -26,14 +26,14 @@ export async function benchTrends(target: Target): Promise<BenchRow[]> {
   let stored = 0;
   const before = async () => {
     stored += 1;
-    // the newest takes the place of the oldest, so that the series keeps its 40 points
-    await storePoint(pool, clinic, 'cat', new Date(Date.now() - 86_400_000 + stored));
-    await pool.query(
+    // it takes the place and day of another one, so that the series keeps its 40 points on 40 days
+    const { rows: replaced } = await pool.query<{ takenAt: Date }>(
       `update measurements set voided_at = now(), voided_by = recorded_by, void_reason = 'duplicate'
        where id = (select id from measurements where patient_id = $1 and measure = 'cat' and voided_at is null
-         order by taken_at limit 1)`,
-      [clinic.patientId],
+         order by taken_at offset $2 limit 1 for update skip locked) returning taken_at as "takenAt"`,
+      [clinic.patientId, stored % 40],
     );
+    for (const { takenAt } of replaced) await storePoint(pool, clinic, 'cat', takenAt);
   };
   for (const clients of [1, 8, 32]) {
     const run = (path: string) =>

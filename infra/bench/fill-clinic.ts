@@ -11,6 +11,7 @@ export interface BenchClinic {
 }
 
 const measures = ['fev1', 'fvc', 'fev1fvc', 'tlc', 'sixMinuteWalkDistance', 'cat'];
+const spirometry = new Set(['fev1', 'fvc', 'fev1fvc']);
 const base: Record<string, number> = {
   fev1: 1320,
   fvc: 2780,
@@ -108,15 +109,16 @@ export async function storePoint(
   ids: { clinicId: string; userId: string; patientId: string },
   measure: string,
   at: Date,
+  sourceId: string | null = null,
 ) {
-  const isSpirometry = measure === 'fev1' || measure === 'fvc' || measure === 'fev1fvc';
+  const isSpirometry = spirometry.has(measure);
   const spread = 1 + 0.05 * Math.sin(at.getTime() / 86_400_000);
   const value = (base[measure] ?? 1) * spread;
   const id = randomUUID();
   await client.query(
     `insert into measurements (id, clinic_id, patient_id, measure, taken_at, value, state, conditions, height_cm,
        height_method, weight_kg, source_kind, source_id, recorded_by, created_at, updated_at)
-     values ($1, $2, $3, $4, $5, $6, $7, $8, 174.5, 'measured', 78, $9, $1, $10, now(), now())`,
+     values ($1, $2, $3, $4, $5, $6, $7, $8, 174.5, 'measured', 78, $9, $11, $10, now(), now())`,
     [
       id,
       ids.clinicId,
@@ -128,6 +130,7 @@ export async function storePoint(
       conditionsOf(measure),
       isSpirometry ? 'spirometry-test' : 'measurement',
       ids.userId,
+      sourceId ?? id,
     ],
   );
 }

@@ -1,7 +1,7 @@
 import { defineMeasure, volume } from './define-measure';
 import { fef2575Variability, fev1Variability, fvcVariability } from './variability';
 
-// Plausible and absolute ranges: rule 0.7, set by this product. LOINC codes: rule book section 9.
+// Plausible and absolute ranges: rule 0.7, set by this product. LOINC codes: published code lists.
 const common = {
   group: 'spirometry',
   usesBronchodilatorState: true,

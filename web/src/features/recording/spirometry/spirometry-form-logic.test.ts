@@ -42,7 +42,7 @@ const nothingEarlier: SpirometryEarlier = {
 };
 
 describe('bestPreview', () => {
-  // Rule SP-2, cases 1, 2 and 4 of the rule book (Graham 2019), in liters; "usable" and "neither" are both "not used" here.
+  // Rule SP-2, cases 1, 2 and 4 (Graham 2019), in liters; "usable" and "neither" are both "not used" here.
   it.each([
     ['case 1', setOf(blow('1.210', '2.560'), blow('1.260', '2.490'), blow('1.190', '2.610')), 1.26, 2.61, 1, 2],
     [
