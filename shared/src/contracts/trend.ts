@@ -80,6 +80,8 @@ export const trendChange = z.object({
   yardsticks: z.array(yardstick),
 });
 
+const rate = z.object({ value: z.number(), low: z.number(), high: z.number() });
+
 export const trendSeries = z.object({
   measure: z.string(),
   unit: z.string(),
@@ -93,7 +95,9 @@ export const trendSeries = z.object({
   change: trendChange.nullable(),
   /** Half-width, in the raw unit, of the change drawn as too small to count. */
   zone: number,
-  ratePerYear: z.object({ value: z.number(), low: z.number(), high: z.number() }).nullable(),
+  ratePerYear: rate.nullable(),
+  /** The same for percent predicted, in percentage points; null without predictions. */
+  percentPredictedRatePerYear: rate.nullable(),
   notes: z.array(z.string()),
 });
 

@@ -1,4 +1,4 @@
-import { getMeasure, type MeasureId } from '@slighthill/shared/measures';
+import { getMeasure, type Measure, type MeasureId } from '@slighthill/shared/measures';
 import { gradingRuleFor } from '../grading/index';
 import { bandsOf } from '../grading/bands-of';
 import type { Window } from './baseline-and-latest';
@@ -60,6 +60,7 @@ export function computeSeries(
     change: changed?.change ?? null,
     zone: changed?.zone ?? null,
     ratePerYear: rate,
+    percentPredictedRatePerYear: percentRate(measure, comparable.days, evaluator),
     notes: [
       ...leftOutNotes(points),
       ...(note ? [note] : []),
@@ -70,4 +71,18 @@ export function computeSeries(
       ...(rateNote && points.length > 0 ? [rateNote] : []),
     ],
   };
+}
+
+/** In percentage points a year, over the comparable days with a prediction (rule TR-5); a ratio has none (rule 0.4). */
+function percentRate(
+  measure: Measure,
+  days: readonly TrendMeasurement[],
+  evaluator: Evaluator,
+): TrendSeries['percentPredictedRatePerYear'] {
+  if (measure.referenceKind === null || measure.unit.ucum === '1') return null;
+  const percents = days.flatMap((day) => {
+    const percent = evaluator.evaluate(day).assessed?.percentPredicted;
+    return percent === undefined ? [] : [{ takenOn: day.takenOn, value: percent }];
+  });
+  return ratePerYear(percents).rate;
 }

@@ -139,6 +139,8 @@ export interface TrendSeries {
   /** The largest threshold that applies, in the raw unit: what is drawn as too small to count. */
   zone: number | null;
   ratePerYear: TrendRate | null;
+  /** The same for percent predicted, in percentage points (rule TR-5); null without predictions. */
+  percentPredictedRatePerYear: TrendRate | null;
   notes: string[];
 }
 

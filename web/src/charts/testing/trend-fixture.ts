@@ -35,6 +35,7 @@ export const aSeries = (measure: string, points: TrendPoint[], more: Partial<Tre
   change: null,
   zone: null,
   ratePerYear: null,
+  percentPredictedRatePerYear: null,
   notes: [],
   ...more,
 });

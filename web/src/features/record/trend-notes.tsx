@@ -16,10 +16,17 @@ const rateWords = ({ measure, unit, ratePerYear }: TrendSeries): string | null =
   return `Rate ${write(ratePerYear.value)} ${per} (95% interval ${write(ratePerYear.low)} to ${write(ratePerYear.high)}).`;
 };
 
+/** Percent predicted moves by itself as the predicted value falls with age, so its rate is said beside the raw one. */
+const percentRateWords = ({ percentPredictedRatePerYear: rate }: TrendSeries): string | null => {
+  if (!rate) return null;
+  const write = (value: number) => formatChange(value, 1);
+  return `Percent predicted ${write(rate.value)} percentage points a year (95% interval ${write(rate.low)} to ${write(rate.high)}).`;
+};
+
 /** What was left out of the comparison and why, and how fast the value changes. */
 export const TrendNotes = ({ series }: TrendNotesProps) => {
-  const rate = rateWords(series);
-  const notes = rate ? [rate, ...series.notes] : series.notes;
+  const rates = [rateWords(series), percentRateWords(series)].filter((words) => words !== null);
+  const notes = [...rates, ...series.notes];
   return (
     <div className="text-note text-ink-soft">
       {notes.length === 0 ? (
